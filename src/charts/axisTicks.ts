@@ -74,3 +74,8 @@ export function engineeringScale(size: number): EngineeringScale {
   const written = [...String(exponent)].map((sign) => superscripts[sign] ?? sign).join('');
   return { factor: 10 ** exponent, prefix: `10${written} ` };
 }
+
+/** An axis number without trailing zeros, with a true minus sign. */
+export function tickLabel(value: number): string {
+  return String(Number(value.toPrecision(3))).replace('-', '−');
+}

@@ -1,11 +1,11 @@
 import type { Data } from 'plotly.js';
 import { type ParityPoint } from '../../shared/schemas/overview.ts';
 import { type Verdict, verdicts } from '../../shared/schemas/verdict.ts';
-import { logTicks } from './axisTicks.ts';
+import { logTicks, tickLabel } from './axisTicks.ts';
 import { type ChartTheme } from './chartTheme.ts';
 import { type Drawing } from './drawing.ts';
 import { escapeMarkup } from './escapeMarkup.ts';
-import { formatPlain } from './formatPlain.ts';
+import { formatQuantity } from '../../shared/units/formatQuantity.ts';
 import { formatRange } from './formatRange.ts';
 import { verdictMarks } from './verdictMarks.ts';
 
@@ -22,7 +22,7 @@ export function drawParity(points: readonly ParityPoint[], theme: ChartTheme): D
     range: [Math.log10(from), Math.log10(to)] as [number, number],
     tickmode: 'array' as const,
     tickvals: values,
-    ticktext: values.map((value) => formatPlain(value)),
+    ticktext: values.map(tickLabel),
   };
   return {
     data: [
@@ -100,7 +100,7 @@ function marks(points: readonly ParityPoint[], verdict: Verdict, theme: ChartThe
     customdata: points.map(({ fixtureId }) => fixtureId),
     hovertext: points.map(
       ({ code, label, theory, fitted }) =>
-        `${escapeMarkup(code)}, ${escapeMarkup(label)}: ${verdict}<br>theory ${formatPlain(theory)}, ` +
+        `${escapeMarkup(code)}, ${escapeMarkup(label)}: ${verdict}<br>theory ${formatQuantity(theory)}, ` +
         `fitted ${formatRange(fitted)} rad/s²`,
     ),
     hoverinfo: 'text',

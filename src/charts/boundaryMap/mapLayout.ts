@@ -1,8 +1,7 @@
 import type { Layout } from 'plotly.js';
-import { engineeringScale, logTicks } from '../axisTicks.ts';
+import { engineeringScale, logTicks, tickLabel } from '../axisTicks.ts';
 import { type ChartTheme, withOpacity } from '../chartTheme.ts';
 import { escapeMarkup } from '../escapeMarkup.ts';
-import { formatPlain } from '../formatPlain.ts';
 import { type MapFrame } from './mapFrame.ts';
 import { type MapScene } from './mapScene.ts';
 
@@ -30,7 +29,7 @@ function axis([from, to]: readonly [number, number], log: boolean, unit = 1): Pa
     range: [Math.log10(from), Math.log10(to)],
     tickmode: 'array',
     tickvals: values,
-    ticktext: values.map((value) => formatPlain(value / unit)),
+    ticktext: values.map((value) => tickLabel(value / unit)),
   };
 }
 
@@ -43,7 +42,7 @@ function inertiaAxis(frame: MapFrame): Partial<Axis> {
     ...axis(frame.x, false),
     tickmode: 'array',
     tickvals: values,
-    ticktext: values.map((value) => formatPlain(value / factor)),
+    ticktext: values.map((value) => tickLabel(value / factor)),
     title,
   };
 }

@@ -1,6 +1,7 @@
 import type { Data } from 'plotly.js';
 import { outcomes, type Outcome } from '../../../shared/schemas/trial.ts';
 import { formatRange } from '../formatRange.ts';
+import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { type ChartTheme } from '../chartTheme.ts';
 import { escapeMarkup } from '../escapeMarkup.ts';
 import { outcomeMarks } from '../outcomeMarks.ts';
@@ -163,7 +164,7 @@ export function limitMarks(frame: MapFrame, theme: ChartTheme): Data[] {
       customdata: limited.map(({ label }) => label),
       hovertext: limited.map(
         ({ label, workingLimit }) =>
-          `${escapeMarkup(label)}: working limit ${formatRange({ estimate: workingLimit, lower: null, upper: null })} rad/s²`,
+          `${escapeMarkup(label)}: working limit ${formatQuantity(workingLimit, { rounding: 'down' })} rad/s²`,
       ),
       hoverinfo: 'text',
       marker: {

@@ -1,0 +1,19 @@
+import { type LogProblem } from '../../../shared/schemas/trialLog.ts';
+
+/**
+ * Refused rows as CSV (RFC 4180, UTF-8 with a byte-order mark so that spreadsheets read it), each
+ * with its reason. A text that a spreadsheet would take for a formula is made plain with `'`.
+ */
+export function refusedRowsCsv(problems: readonly LogProblem[]): string {
+  const lines = problems.map(({ row, column, value, reason }) =>
+    [row === 0 ? '' : String(row), text(column ?? ''), text(value ?? ''), text(reason)].join(','),
+  );
+  return `\uFEFF${['row,column,value,reason', ...lines].join('\r\n')}\r\n`;
+}
+
+const formulaStart = /^[\u0000\t\r=+\-@\uFF1D\uFF0B\uFF0D\uFF20]/;
+
+function text(value: string): string {
+  const safe = formulaStart.test(value) ? `'${value}` : value;
+  return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
+}

@@ -1,0 +1,89 @@
+/** Twice the drop of a profile (penalised) log-likelihood along one quantity. */
+export interface Profile {
+  /** Deviance D ≥ 0 at x and its derivative. */
+  at: (x: number) => { deviance: number; slope: number };
+  /** The same, sure to be the best of several local maxima; later calls of `at` start from it. */
+  surely: (x: number) => number;
+}
+
+export interface EndSearch {
+  /** Where the search starts; one of the profiles is at or below `crit` there. */
+  from: number;
+  direction: 1 | -1;
+  crit: number;
+  /** A first step: about one standard error. */
+  scale: number;
+  /** The range in which trials lie: steps stay short there, so that no bump is stepped over. */
+  range: readonly [number, number];
+}
+
+/** ln of the largest acceleration or torque that a double holds, with room to spare. */
+const LN_MAX = 690;
+
+/**
+ * End of the connected part of { x : min over profiles of D(x) ≤ crit } that holds `from`, or null
+ * when the set does not end on that side (as far as double precision reaches).
+ *
+ * One profile is followed to its crossing; if another is still inside there, it is followed on.
+ */
+export function findEnd(profiles: readonly Profile[], search: EndSearch): number | null {
+  let from = search.from;
+  for (let round = 0; round < 50; round++) {
+    const inside = profiles.find((profile) => profile.surely(from) <= search.crit + 1e-8);
+    if (!inside) return round === 0 ? null : from;
+    const end = follow(inside, { ...search, from });
+    if (end === null) return null;
+    if (Math.abs(end - from) <= 1e-12 * (1 + Math.abs(end)) && round > 0) return end;
+    const others = profiles.filter((profile) => profile !== inside);
+    if (
+      inside.surely(end) >= search.crit - 1e-7 &&
+      others.every((profile) => profile.surely(end) >= search.crit - 1e-7)
+    ) {
+      return end;
+    }
+    from = end;
+  }
+  return from;
+}
+
+/** Follows one profile outwards to where it crosses `crit`. */
+function follow(profile: Profile, search: EndSearch): number | null {
+  const { direction, crit, range } = search;
+  const root = Math.sqrt(crit);
+  let inside = search.from;
+  let at = profile.at(inside);
+  let outside: number | null = null;
+  let step = search.scale;
+  const longest = Math.max((range[1] - range[0]) / 16, search.scale / 4);
+  while (outside === null) {
+    // √D is nearly straight: its tangent says how far the crossing is
+    const r = Math.sqrt(Math.max(at.deviance, 0));
+    const rate = (direction * at.slope) / (2 * r);
+    const expected = r > 0.05 * root && rate > 0 ? ((root - r) / rate) * 1.02 + 1e-9 : step * 2;
+    step = Math.min(Math.max(expected, step / 8), step * 3);
+    const near = inside > range[0] - longest && inside < range[1] + longest;
+    if (near) step = Math.min(step, longest);
+    const next = inside + direction * step;
+    if (Math.abs(next) > LN_MAX) return null;
+    const there = profile.at(next);
+    if (there.deviance > crit) outside = next;
+    else inside = next;
+    at = there;
+  }
+  // at belongs to `outside`; Newton on √D, kept inside the bracket
+  let x = outside;
+  for (let i = 0; i < 100; i++) {
+    if (Math.abs(at.deviance - crit) < 1e-10 * (1 + crit)) return x;
+    if (Math.abs(outside - inside) <= 4e-16 * (1 + Math.abs(outside))) return inside;
+    const r = Math.sqrt(Math.max(at.deviance, 0));
+    const newton = x + ((root - r) * 2 * r) / at.slope;
+    const [low, high] = inside < outside ? [inside, outside] : [outside, inside];
+    const width = high - low;
+    const usable = i < 30 && newton > low + 1e-3 * width * (i > 8 ? 1 : 0) && newton < high;
+    x = usable ? newton : low + width / 2;
+    at = profile.at(x);
+    if (at.deviance > crit) outside = x;
+    else inside = x;
+  }
+  return inside;
+}

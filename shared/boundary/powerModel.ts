@@ -1,0 +1,131 @@
+import type { BoundaryData } from './collect.ts';
+import { findEnd, type Profile } from './findEnd.ts';
+import {
+  fitLinear,
+  withCoefficient,
+  type LinearConstraint,
+  type LinearFit,
+  type LinearProblem,
+} from './fitLinear.ts';
+import type { LinkFunction } from './link.ts';
+import { linearSeparation } from './linearSeparation.ts';
+import { NO_SLOPE, type Absence } from './profileInterval.ts';
+import type { SeparationKind } from './separation.ts';
+
+/** logit P = b₀ + b·ln α + b₂·ln J, fitted as a + b·z + c·(ln J − mean) with b₂ = b + c. */
+export interface PowerModel {
+  problem: LinearProblem;
+  fit: LinearFit;
+  separation: SeparationKind;
+  /** Coefficients intercept, lnAcceleration, lnInertia in their own scale. */
+  natural: Float64Array;
+  covariance: Float64Array | null;
+  meanLnInertia: number;
+}
+
+const COLUMNS = 3;
+
+/** Fits the power model; singular when all configurations share one inertia. */
+export function fitPower(data: BoundaryData, link: LinkFunction, penalised: boolean): PowerModel {
+  const { cells, centre, configurations } = data;
+  const lnJ = configurations.map((c) => Math.log(c.equivalentInertia));
+  const meanLnInertia = lnJ.reduce((sum, value) => sum + value, 0) / lnJ.length;
+  const design = new Float64Array(COLUMNS * cells.size);
+  for (let i = 0; i < cells.size; i++) {
+    design[3 * i] = 1;
+    design[3 * i + 1] = cells.z[i]!;
+    design[3 * i + 2] = lnJ[cells.configuration[i]!]! - meanLnInertia;
+  }
+  const problem: LinearProblem = { columns: COLUMNS, design, n: cells.n, k: cells.k, link };
+  const fit = fitLinear(problem, penalised);
+  const separation = penalised ? 'none' : linearSeparation(problem, fit);
+  const [a, b, c] = [fit.beta[0]!, fit.beta[1]!, fit.beta[2]!];
+  // rows: intercept = a − b·centre − c·mean, lnAcceleration = b, lnInertia = b + c
+  const turn = [1, -centre, -meanLnInertia, 0, 1, 0, 0, 1, 1];
+  const natural = Float64Array.from([a - b * centre - c * meanLnInertia, b, b + c]);
+  const covariance = fit.covariance ? sandwich(turn, fit.covariance) : null;
+  return { problem, fit, separation, natural, covariance, meanLnInertia };
+}
+
+function sandwich(t: readonly number[], covariance: Float64Array): Float64Array {
+  const result = new Float64Array(9);
+  for (let i = 0; i < 3; i++) {
+    for (let j = 0; j < 3; j++) {
+      let sum = 0;
+      for (let k = 0; k < 3; k++) {
+        for (let l = 0; l < 3; l++) sum += t[3 * i + k]! * covariance[3 * k + l]! * t[3 * j + l]!;
+      }
+      result[3 * i + j] = sum;
+    }
+  }
+  return result;
+}
+
+/** Exponent fixed at k: c = b·(k − 1), still linear in (a, b). */
+export function exponentAt(k: number): LinearConstraint {
+  return {
+    origin: new Float64Array(COLUMNS),
+    basis: Float64Array.from([1, 0, 0, 1, 0, k - 1]),
+    free: 2,
+  };
+}
+
+/** The power model's exponent k = b₂/b with its profile interval; theory says 1. */
+export function exponentInterval(
+  power: PowerModel,
+  penalised: boolean,
+  crit: number,
+): {
+  estimate: number | null;
+  lower: number | null;
+  upper: number | null;
+  absence: Absence | null;
+} {
+  const { problem, fit, separation } = power;
+  const none = { estimate: null, lower: null, upper: null };
+  if (fit.status !== 'converged') return { ...none, absence: 'not fitted' };
+  if (!penalised && separation !== 'none') return { ...none, absence: 'separated' };
+  const b = fit.beta[1]!;
+  if (!(b > NO_SLOPE)) return { ...none, absence: 'falling' };
+  const estimate = 1 + fit.beta[2]! / b;
+  let warm = Float64Array.from([fit.beta[0]!, b]);
+  const from = (k: number, start: Float64Array) =>
+    fitLinear(problem, penalised, exponentAt(k), start);
+  const deviance = (there: LinearFit) => Math.max(0, 2 * (fit.value - there.value));
+  const profile: Profile = {
+    at(k) {
+      const there = from(k, warm);
+      if (there.status === 'converged') warm = Float64Array.from(there.free);
+      return { deviance: deviance(there), slope: -2 * there.beta[1]! * there.gradient[2]! };
+    },
+    surely(k) {
+      let best = from(k, warm);
+      for (const factor of [-1, 0.2, 3]) {
+        const there = from(k, Float64Array.from([fit.beta[0]!, factor * b]));
+        if (there.status === 'converged' && there.value > best.value + 1e-9) best = there;
+      }
+      warm = Float64Array.from(best.free);
+      return deviance(best);
+    },
+  };
+  const level = fitLinear(problem, penalised, withCoefficient(COLUMNS, 1, 0));
+  const se = Math.sqrt(Math.max(1e-12, fit.covariance![8]!)) / b;
+  const search = {
+    from: estimate,
+    crit,
+    scale: se,
+    range: [estimate - 4 * se, estimate + 4 * se] as const,
+  };
+  const absent = deviance(level) <= crit;
+  return {
+    estimate: absent ? null : estimate,
+    lower: findEnd([profile], { ...search, direction: -1 }),
+    upper: findEnd([profile], { ...search, direction: 1 }),
+    absence: absent ? 'flat' : null,
+  };
+}
+
+/** The scaled model inside the power model (exponent 1), under the power model's penalty. */
+export function scaledInPower(power: PowerModel, penalised: boolean): LinearFit {
+  return fitLinear(power.problem, penalised, exponentAt(1));
+}

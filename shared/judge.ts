@@ -37,7 +37,7 @@ export function judge(fit: BoundaryFit, request: JudgeRequest): AnalysisResult {
   const rules: { byRule: number | null; equivalentInertia: number }[] = [];
 
   const configurations = data.configurations.map((own, c): ConfigurationResult => {
-    const fitted = fit.configurations[c]!;
+    const fitted = fit.configurations[c];
     const bounds = theoryOf(own, request.friction, confidence);
     const theory = {
       holding: bounds.kinetic?.alpha ?? null,
@@ -56,7 +56,7 @@ export function judge(fit: BoundaryFit, request: JudgeRequest): AnalysisResult {
     const level = levelCheck(fitted.level50, bounds, request.tolerance, own.trials.length);
     const sent =
       request.workingLimits && Object.hasOwn(request.workingLimits, own.label)
-        ? request.workingLimits[own.label]!
+        ? request.workingLimits[own.label]
         : byTheory;
     const tally = countAtOrBelow(own, failed, sent ?? 0);
     const margin = marginCheck(sent, fitted.target, tally, target, confidence);
@@ -106,7 +106,7 @@ export function judge(fit: BoundaryFit, request: JudgeRequest): AnalysisResult {
     separation: {
       overall: fit.separation.overall,
       configurations: Object.fromEntries(
-        data.configurations.map((c, i) => [c.label, fit.separation.configurations[i]!]),
+        data.configurations.map((c, i) => [c.label, fit.separation.configurations[i]]),
       ),
     },
     models: fit.models,

@@ -30,25 +30,25 @@ export function createArrow(reps: number, globals: number): Arrow {
  */
 export function solveArrow(arrow: Arrow, rhs: Float64Array, x: Float64Array): boolean {
   const { reps, globals, diagonal, border, core } = arrow;
-  let c00 = core[0]!;
-  let c01 = core[1]!;
-  let c11 = core[3]!;
-  let r0 = globals > 0 ? rhs[reps]! : 0;
-  let r1 = globals > 1 ? rhs[reps + 1]! : 0;
+  let c00 = core[0];
+  let c01 = core[1];
+  let c11 = core[3];
+  let r0 = globals > 0 ? rhs[reps] : 0;
+  let r1 = globals > 1 ? rhs[reps + 1] : 0;
   const [full00, full11] = [c00, c11];
   for (let r = 0; r < reps; r++) {
-    const d = diagonal[r]!;
+    const d = diagonal[r];
     if (!(d > 0)) return false;
     if (globals === 0) continue;
-    const b0 = border[r]!;
+    const b0 = border[r];
     const q = b0 / d;
     c00 -= q * b0;
-    r0 -= q * rhs[r]!;
+    r0 -= q * rhs[r];
     if (globals > 1) {
-      const b1 = border[reps + r]!;
+      const b1 = border[reps + r];
       c01 -= q * b1;
       c11 -= (b1 * b1) / d;
-      r1 -= (b1 / d) * rhs[r]!;
+      r1 -= (b1 / d) * rhs[r];
     }
   }
   let x0 = 0;
@@ -67,7 +67,7 @@ export function solveArrow(arrow: Arrow, rhs: Float64Array, x: Float64Array): bo
     x[reps + 1] = x1;
   }
   for (let r = 0; r < reps; r++) {
-    x[r] = (rhs[r]! - border[r]! * x0 - border[reps + r]! * x1) / diagonal[r]!;
+    x[r] = (rhs[r] - border[r] * x0 - border[reps + r] * x1) / diagonal[r];
   }
   return true;
 }

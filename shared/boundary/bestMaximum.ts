@@ -5,11 +5,11 @@ import { maximise, type Maximum, type MaximiseOptions } from './maximise.ts';
 /** Slopes worth trying: both signs, from a tenth over the whole range to forty per smallest step. */
 export function slopeGrid(model: CommonSlope): number[] {
   const levels = [...new Set(model.cells.z)].sort((x, y) => x - y);
-  const span = levels[levels.length - 1]! - levels[0]!;
+  const span = levels[levels.length - 1] - levels[0];
   if (!(span > 0)) return [0];
   let gap = span;
   for (let i = 1; i < levels.length; i++) {
-    const step = levels[i]! - levels[i - 1]!;
+    const step = levels[i] - levels[i - 1];
     if (step > 1e-3 * span) gap = Math.min(gap, step);
   }
   const grid = [0];
@@ -35,7 +35,7 @@ export function bestMaximum(
   if (constraint.fixedSlope !== null || constraint.onExtra !== null) return best;
   const slopes = slopeGrid(model);
   const origin = best.status === 'singular' ? start : best.free;
-  const b0 = origin[constraint.reps]!;
+  const b0 = origin[constraint.reps];
   const split = slopes.findIndex((b) => b > b0);
   const cut = split < 0 ? slopes.length : split;
   for (const side of [slopes.slice(cut), slopes.slice(0, cut).reverse()]) {
@@ -76,10 +76,10 @@ function turn(
   const weight = new Float64Array(constraint.reps);
   const moment = new Float64Array(constraint.reps);
   for (let g = 0; g < model.groups; g++) {
-    const r = constraint.rep[g]!;
+    const r = constraint.rep[g];
     if (r < 0) continue;
-    weight[r]! += model.infoAA[g]!;
-    moment[r]! += model.infoAB[g]! + constraint.onSlope[g]! * model.infoAA[g]!;
+    weight[r] += model.infoAA[g];
+    moment[r] += model.infoAB[g] + constraint.onSlope[g] * model.infoAA[g];
   }
-  return reps.map((a, r) => (weight[r]! > 0 ? a + ((from - to) * moment[r]!) / weight[r]! : a));
+  return reps.map((a, r) => (weight[r] > 0 ? a + ((from - to) * moment[r]) / weight[r] : a));
 }

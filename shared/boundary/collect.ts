@@ -87,7 +87,7 @@ export function collect(request: CollectRequest): BoundaryData {
       equivalentInertia: trial.inertia,
       torquePerMu: torqueOf(request.torquePerMu, label),
       inertiaRelativeUncertainty:
-        uncertainties && Object.hasOwn(uncertainties, label) ? uncertainties[label]! : 0,
+        uncertainties && Object.hasOwn(uncertainties, label) ? uncertainties[label] : 0,
       trials: [],
       slips: 0,
       highestHeld: null,
@@ -105,10 +105,10 @@ export function collect(request: CollectRequest): BoundaryData {
   const counts = configurations.map(() => new Map<number, { n: number; k: number }>());
   for (const trial of single) {
     const at = index.get(trial.configuration)!;
-    const c = configurations[at]!;
+    const c = configurations[at];
     c.trials.push(trial);
     const { acceleration } = trial;
-    const cell = counts[at]!.get(acceleration) ?? { n: 0, k: 0 };
+    const cell = counts[at].get(acceleration) ?? { n: 0, k: 0 };
     cell.n += 1;
     if (failed(trial)) {
       cell.k += 1;
@@ -117,7 +117,7 @@ export function collect(request: CollectRequest): BoundaryData {
     } else {
       c.highestHeld = Math.max(c.highestHeld ?? 0, acceleration);
     }
-    counts[at]!.set(acceleration, cell);
+    counts[at].set(acceleration, cell);
   }
   const { cells, centre } = toCells(configurations, counts);
   return { configurations, cells, centre, referenceTorque, sent: request.trials, series };
@@ -129,7 +129,7 @@ function toCells(
 ): { cells: Cells; centre: number } {
   const rows = configurations.flatMap((c, configuration) => {
     const lnJ = Math.log(c.equivalentInertia);
-    return [...counts[configuration]!]
+    return [...counts[configuration]]
       .sort(([x], [y]) => x - y)
       .map(([acceleration, { n, k }]) => ({
         configuration,

@@ -52,7 +52,7 @@ export function createCommonSlope(
 ): CommonSlope {
   const { size, configuration, z, n, k } = cells;
   const G = partition.groups;
-  const group = Int32Array.from(configuration, (c) => partition.groupOf[c]!);
+  const group = Int32Array.from(configuration, (c) => partition.groupOf[c]);
   const out = new Float64Array(7);
   const w = new Float64Array(size);
   const w1 = new Float64Array(size);
@@ -98,32 +98,32 @@ export function createCommonSlope(
     let hessBB = 0;
     let infoBB = 0;
     for (let i = 0; i < size; i++) {
-      const g = group[i]!;
+      const g = group[i];
       if (skip[g] === 1) continue;
-      const zi = z[i]!;
-      link.at(a[g]! + b * zi, out);
-      const slips = k[i]!;
-      const holds = n[i]! - slips;
-      const r1 = out[2]!;
-      const r0 = out[3]!;
-      const g1 = out[4]!;
-      const g0 = out[5]!;
-      if (slips > 0) logLik += slips * out[0]!;
-      if (holds > 0) logLik += holds * out[1]!;
+      const zi = z[i];
+      link.at(a[g] + b * zi, out);
+      const slips = k[i];
+      const holds = n[i] - slips;
+      const r1 = out[2];
+      const r0 = out[3];
+      const g1 = out[4];
+      const g0 = out[5];
+      if (slips > 0) logLik += slips * out[0];
+      if (holds > 0) logLik += holds * out[1];
       const score = slips * r1 - holds * r0;
       const curve = holds * r0 * g0 - slips * r1 * g1;
-      gradA[g]! += score;
+      gradA[g] += score;
       gradB += score * zi;
-      hessAA[g]! += curve;
-      hessAB[g]! += curve * zi;
+      hessAA[g] += curve;
+      hessAB[g] += curve * zi;
       hessBB += curve * zi * zi;
-      const wi = n[i]! * r1 * r0;
+      const wi = n[i] * r1 * r0;
       const u = g1 + g0;
       w[i] = wi;
       w1[i] = wi * u;
-      w2[i] = wi * (u * u + out[6]!);
-      sumW[g]! += wi;
-      sumWz[g]! += wi * zi;
+      w2[i] = wi * (u * u + out[6]);
+      sumW[g] += wi;
+      sumWz[g] += wi * zi;
       infoBB += wi * zi * zi;
     }
     model.logLik = logLik;
@@ -140,44 +140,44 @@ export function createCommonSlope(
     P.fill(0);
     R.fill(0);
     V.fill(0);
-    for (let g = 0; g < G; g++) mean[g] = sumWz[g]! / sumW[g]!;
+    for (let g = 0; g < G; g++) mean[g] = sumWz[g] / sumW[g];
     for (let i = 0; i < size; i++) {
-      const g = group[i]!;
-      const u = z[i]! - mean[g]!;
+      const g = group[i];
+      const u = z[i] - mean[g];
       const u2 = u * u;
-      V[g]! += w[i]! * u2;
-      const p = w1[i]!;
-      const r = w2[i]!;
+      V[g] += w[i] * u2;
+      const p = w1[i];
+      const r = w2[i];
       const at = 4 * g;
-      P[at]! += p;
-      P[at + 1]! += p * u;
-      P[at + 2]! += p * u2;
-      P[at + 3]! += p * u2 * u;
+      P[at] += p;
+      P[at + 1] += p * u;
+      P[at + 2] += p * u2;
+      P[at + 3] += p * u2 * u;
       const to = 5 * g;
-      R[to]! += r;
-      R[to + 1]! += r * u;
-      R[to + 2]! += r * u2;
-      R[to + 3]! += r * u2 * u;
-      R[to + 4]! += r * u2 * u2;
+      R[to] += r;
+      R[to + 1] += r * u;
+      R[to + 2] += r * u2;
+      R[to + 3] += r * u2 * u;
+      R[to + 4] += r * u2 * u2;
     }
     let total = 0;
-    for (let g = 0; g < G; g++) total += V[g]!;
+    for (let g = 0; g < G; g++) total += V[g];
     let logDet = penalty === 'common' ? Math.log(total) : 0;
     for (let g = 0; g < G; g++) {
-      const S = sumW[g]!;
+      const S = sumW[g];
       logDet += Math.log(S);
-      const v = penalty === 'common' ? total : V[g]!;
+      const v = penalty === 'common' ? total : V[g];
       if (penalty === 'separate') logDet += Math.log(v);
-      const [p0, p1, p2, p3] = [P[4 * g]!, P[4 * g + 1]!, P[4 * g + 2]!, P[4 * g + 3]!];
+      const [p0, p1, p2, p3] = [P[4 * g], P[4 * g + 1], P[4 * g + 2], P[4 * g + 3]];
       const to = 5 * g;
       // derivatives by (a + b·m, b) about the weighted mean m, where ΣwU = 0
       const gradA = 0.5 * (p0 / S + p2 / v);
       const gradB = 0.5 * (p1 / S + p3 / v);
-      let aa = R[to]! / S - (p0 / S) ** 2 + (R[to + 2]! - (2 * p1 * p1) / S) / v;
-      let ab = R[to + 1]! / S - (p0 * p1) / (S * S) + (R[to + 3]! - (2 * p1 * p2) / S) / v;
-      let bb = R[to + 2]! / S - (p1 / S) ** 2 + (R[to + 4]! - (2 * p2 * p2) / S) / v;
+      let aa = R[to] / S - (p0 / S) ** 2 + (R[to + 2] - (2 * p1 * p1) / S) / v;
+      let ab = R[to + 1] / S - (p0 * p1) / (S * S) + (R[to + 3] - (2 * p1 * p2) / S) / v;
+      let bb = R[to + 2] / S - (p1 / S) ** 2 + (R[to + 4] - (2 * p2 * p2) / S) / v;
       const [va, vb] = [p2 / v, p3 / v];
-      const m = mean[g]!;
+      const m = mean[g];
       if (penalty === 'common') {
         model.rankA[g] = va;
         model.rankB += vb + m * va;
@@ -186,10 +186,10 @@ export function createCommonSlope(
         ab -= va * vb;
         bb -= vb * vb;
       }
-      model.gradA[g]! += gradA;
+      model.gradA[g] += gradA;
       model.gradB += gradB + m * gradA;
-      model.hessAA[g]! -= 0.5 * aa;
-      model.hessAB[g]! -= 0.5 * (ab + m * aa);
+      model.hessAA[g] -= 0.5 * aa;
+      model.hessAB[g] -= 0.5 * (ab + m * aa);
       model.hessBB -= 0.5 * (bb + 2 * m * ab + m * m * aa);
     }
     model.value = model.logLik + 0.5 * logDet;

@@ -56,10 +56,10 @@ export function heterogeneity(
   if (2 * tied > cells.size) {
     let statistic = 0;
     for (let i = 0; i < cells.size; i++) {
-      link.at(a[cells.configuration[i]!]! + b * cells.z[i]!, out);
-      const p = Math.exp(out[0]!);
-      const q = Math.exp(out[1]!);
-      statistic += (cells.k[i]! - cells.n[i]! * p) ** 2 / (cells.n[i]! * p * q);
+      link.at(a[cells.configuration[i]] + b * cells.z[i], out);
+      const p = Math.exp(out[0]);
+      const q = Math.exp(out[1]);
+      statistic += (cells.k[i] - cells.n[i] * p) ** 2 / (cells.n[i] * p * q);
     }
     return judged(statistic, cells.size - cells.configurations - 1, 'levels', cells.size);
   }
@@ -105,38 +105,38 @@ function betweenClusters(
     const lnJ = Math.log(c.equivalentInertia);
     for (const trial of c.trials) {
       const z = Math.log(trial.acceleration) + lnJ - centre;
-      link.at(a[g]! + b * z, out);
-      const score = failed(trial) ? out[2]! : -out[3]!;
-      const w = out[2]! * out[3]!;
+      link.at(a[g] + b * z, out);
+      const score = failed(trial) ? out[2] : -out[3];
+      const w = out[2] * out[3];
       const s = index.get(trial[field]!)!;
-      residual[s]! += score;
-      own[s]! += w;
-      shares[s * groups + g]! += w;
-      levers[s]! += w * (z - mean[g]!);
+      residual[s] += score;
+      own[s] += w;
+      shares[s * groups + g] += w;
+      levers[s] += w * (z - mean[g]);
     }
   });
   // covariance of the residual sums, the fitted intercepts and slope taken out
   const covariance = new Float64Array(clusters * clusters);
   for (let s = 0; s < clusters; s++) {
     for (let t = 0; t < clusters; t++) {
-      let value = s === t ? own[s]! : 0;
+      let value = s === t ? own[s] : 0;
       for (let g = 0; g < groups; g++) {
-        value -= (shares[s * groups + g]! * shares[t * groups + g]!) / weight[g]!;
+        value -= (shares[s * groups + g] * shares[t * groups + g]) / weight[g];
       }
-      covariance[s * clusters + t] = value - levers[s]! * levers[t]! * slopeVariance;
+      covariance[s * clusters + t] = value - levers[s] * levers[t] * slopeVariance;
     }
   }
   const kept = independent(covariance, own, clusters);
   if (kept.length === 0) return null;
   const size = kept.length;
   const reduced = Float64Array.from(
-    kept.flatMap((s) => kept.map((t) => covariance[s * clusters + t]!)),
+    kept.flatMap((s) => kept.map((t) => covariance[s * clusters + t])),
   );
   const factor = cholesky(reduced, size, 1e-10);
   if (!factor) return null;
-  const r = Float64Array.from(kept, (s) => residual[s]!);
+  const r = Float64Array.from(kept, (s) => residual[s]);
   const solved = solveCholesky(factor, r);
-  const statistic = solved.reduce((sum, x, i) => sum + x * r[i]!, 0);
+  const statistic = solved.reduce((sum, x, i) => sum + x * r[i], 0);
   return judged(statistic, size, between, clusters);
 }
 
@@ -145,12 +145,12 @@ function independent(matrix: Float64Array, scale: Float64Array, size: number): n
   const work = Float64Array.from(matrix);
   const kept: number[] = [];
   for (let j = 0; j < size; j++) {
-    const pivot = work[j * size + j]!;
-    if (!(pivot > 1e-8 * scale[j]!)) continue;
+    const pivot = work[j * size + j];
+    if (!(pivot > 1e-8 * scale[j])) continue;
     kept.push(j);
     for (let i = j + 1; i < size; i++) {
-      const factor = work[i * size + j]! / pivot;
-      for (let l = j; l < size; l++) work[i * size + l]! -= factor * work[j * size + l]!;
+      const factor = work[i * size + j] / pivot;
+      for (let l = j; l < size; l++) work[i * size + l] -= factor * work[j * size + l];
     }
   }
   return kept;
@@ -203,9 +203,9 @@ export function drift(
     };
   }
   const without = fitLinear(problem, penalised, withCoefficient(3, 2, 0));
-  const b = full.beta[1]!;
+  const b = full.beta[1];
   return {
-    change: b > NO_SLOPE ? finite(Math.exp(-full.beta[2]! / b)) : null,
+    change: b > NO_SLOPE ? finite(Math.exp(-full.beta[2] / b)) : null,
     p: finite(chiSquareUpper(Math.max(0, 2 * (full.value - without.value)), 1)),
     note: b > NO_SLOPE ? null : 'Drift has no size: the share of slips does not rise.',
   };

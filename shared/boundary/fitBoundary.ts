@@ -123,7 +123,7 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
   const torque = (interval: ProfileInterval) => toEstimate(interval, (z) => Math.exp(z + centre));
   const alpha = (interval: ProfileInterval, c: number) =>
     toEstimate(interval, (z) =>
-      Math.exp(z + centre - Math.log(configurations[c]!.equivalentInertia)),
+      Math.exp(z + centre - Math.log(configurations[c].equivalentInertia)),
     );
 
   const eta50 = link.eta(0.5);
@@ -172,7 +172,7 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
     const group = place >= 0 ? place + 1 : found.length + 1;
     const shift = (crit: number) =>
       toEstimate(shiftFit ? shiftInterval(shiftFit, group, checkBasis, crit) : EMPTY, Math.exp);
-    const own = configurations[c]!;
+    const own = configurations[c];
     const early =
       own.slips === 0
         ? false
@@ -180,13 +180,13 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
           ? true
           : place >= 0 && isLow(common, place + 1);
     return {
-      alpha50: { scaled: alpha(scaled50, c), offsets: alpha(offsets50[c]!, c) },
+      alpha50: { scaled: alpha(scaled50, c), offsets: alpha(offsets50[c], c) },
       source,
       level50: alpha(
         source === 'scaled'
           ? common50
           : source === 'offsets'
-            ? offsets50[c]!
+            ? offsets50[c]
             : quantile(eta50, critWide),
         c,
       ),
@@ -241,7 +241,7 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
     }
     return lowest.map((z, c) => {
       if (z === null || z === Infinity) return null;
-      const value = Math.exp(z + centre - Math.log(configurations[c]!.equivalentInertia));
+      const value = Math.exp(z + centre - Math.log(configurations[c].equivalentInertia));
       return Number.isFinite(value) && value > 0 ? value : null;
     });
   }
@@ -250,5 +250,5 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
 /** Whether a set-apart group slips at a lower torque than the common curve. */
 function isLow(fit: CommonSlopeFit, group: number): boolean {
   const { a, b } = fit.penalised;
-  return (a[0]! - a[group]!) / b < 0;
+  return (a[0] - a[group]) / b < 0;
 }

@@ -33,15 +33,15 @@ function flatStart(model: CommonSlope, constraint: Constraint): Float64Array {
   const trials = new Float64Array(constraint.reps);
   const { cells, groupOf } = model;
   for (let i = 0; i < cells.size; i++) {
-    const r = constraint.rep[groupOf[cells.configuration[i]!]!]!;
+    const r = constraint.rep[groupOf[cells.configuration[i]]];
     if (r < 0) continue;
-    slips[r]! += cells.k[i]!;
-    trials[r]! += cells.n[i]!;
+    slips[r] += cells.k[i];
+    trials[r] += cells.n[i];
   }
   const globals = (constraint.fixedSlope === null ? 1 : 0) + (constraint.onExtra ? 1 : 0);
   const start = new Float64Array(constraint.reps + globals);
   for (let r = 0; r < constraint.reps; r++) {
-    start[r] = model.link.eta((slips[r]! + 0.5) / (trials[r]! + 1));
+    start[r] = model.link.eta((slips[r] + 0.5) / (trials[r] + 1));
   }
   return start;
 }
@@ -55,16 +55,16 @@ export function informationAt(model: CommonSlope, a: Float64Array, b: number): I
   const w = new Float64Array(cells.size);
   const out = new Float64Array(7);
   for (let i = 0; i < cells.size; i++) {
-    const g = groupOf[cells.configuration[i]!]!;
-    link.at(a[g]! + b * cells.z[i]!, out);
-    w[i] = cells.n[i]! * out[2]! * out[3]!;
-    weight[g]! += w[i]!;
-    mean[g]! += w[i]! * cells.z[i]!;
+    const g = groupOf[cells.configuration[i]];
+    link.at(a[g] + b * cells.z[i], out);
+    w[i] = cells.n[i] * out[2] * out[3];
+    weight[g] += w[i];
+    mean[g] += w[i] * cells.z[i];
   }
-  for (let g = 0; g < groups; g++) mean[g]! /= weight[g]!;
+  for (let g = 0; g < groups; g++) mean[g] /= weight[g];
   for (let i = 0; i < cells.size; i++) {
-    const g = groupOf[cells.configuration[i]!]!;
-    spread[g]! += w[i]! * (cells.z[i]! - mean[g]!) ** 2;
+    const g = groupOf[cells.configuration[i]];
+    spread[g] += w[i] * (cells.z[i] - mean[g]) ** 2;
   }
   return { weight, mean, spread };
 }

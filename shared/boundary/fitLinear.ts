@@ -82,21 +82,21 @@ function evaluate(problem: LinearProblem, beta: Float64Array, penalised: boolean
   let logLik = 0;
   for (let i = 0; i < rows; i++) {
     let eta = 0;
-    for (let j = 0; j < p; j++) eta += design[i * p + j]! * beta[j]!;
+    for (let j = 0; j < p; j++) eta += design[i * p + j] * beta[j];
     link.at(eta, out);
-    const slips = k[i]!;
-    const holds = n[i]! - slips;
-    if (slips > 0) logLik += slips * out[0]!;
-    if (holds > 0) logLik += holds * out[1]!;
-    const [r1, r0, g1, g0] = [out[2]!, out[3]!, out[4]!, out[5]!];
-    const w = n[i]! * r1 * r0;
+    const slips = k[i];
+    const holds = n[i] - slips;
+    if (slips > 0) logLik += slips * out[0];
+    if (holds > 0) logLik += holds * out[1];
+    const [r1, r0, g1, g0] = [out[2], out[3], out[4], out[5]];
+    const w = n[i] * r1 * r0;
     const u = g1 + g0;
     weight1[i] = w * u;
-    weight2[i] = w * (u * u + out[6]!);
+    weight2[i] = w * (u * u + out[6]);
     addOuter(information, design, i, p, w);
     addOuter(curvature, design, i, p, holds * r0 * g0 - slips * r1 * g1);
     const score = slips * r1 - holds * r0;
-    for (let j = 0; j < p; j++) gradient[j]! += score * design[i * p + j]!;
+    for (let j = 0; j < p; j++) gradient[j] += score * design[i * p + j];
   }
   const factor = cholesky(information, p);
   const logDet = factor ? factor.logDet : -Infinity;
@@ -109,20 +109,20 @@ function evaluate(problem: LinearProblem, beta: Float64Array, penalised: boolean
   const byColumn = exact ? Array.from({ length: p }, () => new Float64Array(p * p)) : [];
   for (let i = 0; i < rows; i++) {
     const leverage = quadratic(inverse, design, i, p);
-    const pull = 0.5 * leverage * weight1[i]!;
-    for (let j = 0; j < p; j++) gradient[j]! += pull * design[i * p + j]!;
+    const pull = 0.5 * leverage * weight1[i];
+    for (let j = 0; j < p; j++) gradient[j] += pull * design[i * p + j];
     if (exact) {
-      addOuter(curvature, design, i, p, -0.5 * leverage * weight2[i]!);
-      byColumn.forEach((m, j) => addOuter(m, design, i, p, weight1[i]! * design[i * p + j]!));
+      addOuter(curvature, design, i, p, -0.5 * leverage * weight2[i]);
+      byColumn.forEach((m, j) => addOuter(m, design, i, p, weight1[i] * design[i * p + j]));
     }
   }
   if (exact) {
     const turned = byColumn.map((m) => multiply(inverse, m, p));
     for (let j = 0; j < p; j++) {
       for (let l = 0; l <= j; l++) {
-        const half = 0.5 * traceOfProduct(turned[j]!, turned[l]!, p);
-        curvature[j * p + l]! += half;
-        if (l !== j) curvature[l * p + j]! += half;
+        const half = 0.5 * traceOfProduct(turned[j], turned[l], p);
+        curvature[j * p + l] += half;
+        if (l !== j) curvature[l * p + j] += half;
       }
     }
   } else {
@@ -133,17 +133,17 @@ function evaluate(problem: LinearProblem, beta: Float64Array, penalised: boolean
 
 function addOuter(into: Float64Array, design: Float64Array, row: number, p: number, w: number) {
   for (let j = 0; j < p; j++) {
-    const x = w * design[row * p + j]!;
+    const x = w * design[row * p + j];
     if (x === 0) continue;
-    for (let l = 0; l < p; l++) into[j * p + l]! += x * design[row * p + l]!;
+    for (let l = 0; l < p; l++) into[j * p + l] += x * design[row * p + l];
   }
 }
 
 function quadratic(matrix: Float64Array, design: Float64Array, row: number, p: number): number {
   let sum = 0;
   for (let j = 0; j < p; j++) {
-    const x = design[row * p + j]!;
-    for (let l = 0; l < p; l++) sum += x * matrix[j * p + l]! * design[row * p + l]!;
+    const x = design[row * p + j];
+    for (let l = 0; l < p; l++) sum += x * matrix[j * p + l] * design[row * p + l];
   }
   return sum;
 }
@@ -152,8 +152,8 @@ function multiply(a: Float64Array, b: Float64Array, p: number): Float64Array {
   const product = new Float64Array(p * p);
   for (let i = 0; i < p; i++) {
     for (let m = 0; m < p; m++) {
-      const x = a[i * p + m]!;
-      for (let j = 0; j < p; j++) product[i * p + j]! += x * b[m * p + j]!;
+      const x = a[i * p + m];
+      for (let j = 0; j < p; j++) product[i * p + j] += x * b[m * p + j];
     }
   }
   return product;
@@ -161,7 +161,7 @@ function multiply(a: Float64Array, b: Float64Array, p: number): Float64Array {
 
 function traceOfProduct(a: Float64Array, b: Float64Array, p: number): number {
   let sum = 0;
-  for (let i = 0; i < p; i++) for (let j = 0; j < p; j++) sum += a[i * p + j]! * b[j * p + i]!;
+  for (let i = 0; i < p; i++) for (let j = 0; j < p; j++) sum += a[i * p + j] * b[j * p + i];
   return sum;
 }
 
@@ -170,12 +170,12 @@ function largestMove(problem: LinearProblem, c: LinearConstraint, step: Float64A
   const { columns: p, design, n } = problem;
   const move = new Float64Array(p);
   for (let j = 0; j < p; j++) {
-    for (let f = 0; f < c.free; f++) move[j]! += c.basis[j * c.free + f]! * step[f]!;
+    for (let f = 0; f < c.free; f++) move[j] += c.basis[j * c.free + f] * step[f];
   }
   let largest = 0;
   for (let i = 0; i < n.length; i++) {
     let eta = 0;
-    for (let j = 0; j < p; j++) eta += design[i * p + j]! * move[j]!;
+    for (let j = 0; j < p; j++) eta += design[i * p + j] * move[j];
     largest = Math.max(largest, Math.abs(eta));
   }
   return largest;
@@ -186,15 +186,15 @@ function project(matrix: Float64Array, { basis, free }: LinearConstraint, p: num
   const half = new Float64Array(p * free);
   for (let i = 0; i < p; i++) {
     for (let m = 0; m < p; m++) {
-      const x = matrix[i * p + m]!;
-      if (x !== 0) for (let f = 0; f < free; f++) half[i * free + f]! += x * basis[m * free + f]!;
+      const x = matrix[i * p + m];
+      if (x !== 0) for (let f = 0; f < free; f++) half[i * free + f] += x * basis[m * free + f];
     }
   }
   const result = new Float64Array(free * free);
   for (let i = 0; i < p; i++) {
     for (let e = 0; e < free; e++) {
-      const x = basis[i * free + e]!;
-      if (x !== 0) for (let f = 0; f < free; f++) result[e * free + f]! += x * half[i * free + f]!;
+      const x = basis[i * free + e];
+      if (x !== 0) for (let f = 0; f < free; f++) result[e * free + f] += x * half[i * free + f];
     }
   }
   return result;
@@ -221,7 +221,7 @@ export function fitLinear(
   const spread = (gamma: Float64Array) => {
     const beta = Float64Array.from(origin);
     for (let j = 0; j < p; j++) {
-      for (let f = 0; f < free; f++) beta[j]! += basis[j * free + f]! * gamma[f]!;
+      for (let f = 0; f < free; f++) beta[j] += basis[j * free + f] * gamma[f];
     }
     return beta;
   };
@@ -248,7 +248,7 @@ export function fitLinear(
   for (let iteration = 1; iteration <= 300; iteration++) {
     const gradient = new Float64Array(free);
     for (let j = 0; j < p; j++) {
-      for (let f = 0; f < free; f++) gradient[f]! += basis[j * free + f]! * state.gradient[j]!;
+      for (let f = 0; f < free; f++) gradient[f] += basis[j * free + f] * state.gradient[j];
     }
     const factor =
       cholesky(project(state.curvature, constraint, p), free) ??
@@ -256,11 +256,11 @@ export function fitLinear(
     if (!factor) return finish('singular', iteration);
     const step = solveCholesky(factor, gradient);
     let decrement = 0;
-    for (let f = 0; f < free; f++) decrement += step[f]! * gradient[f]!;
+    for (let f = 0; f < free; f++) decrement += step[f] * gradient[f];
     lastMove = largestMove(problem, constraint, step);
     let accepted = false;
     for (let t = 1; t > 1e-12; t /= 2) {
-      const next = gamma.map((value, f) => value + t * step[f]!);
+      const next = gamma.map((value, f) => value + t * step[f]);
       const there = evaluate(problem, spread(next), penalised);
       const gain = there.value - state.value;
       if (

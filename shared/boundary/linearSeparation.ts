@@ -49,14 +49,14 @@ export function linearSeparation(
 function spans(rows: readonly Float64Array[], p: number): boolean {
   const gram = new Float64Array(p * p);
   for (const row of rows) {
-    for (let i = 0; i < p; i++) for (let j = 0; j < p; j++) gram[i * p + j]! += row[i]! * row[j]!;
+    for (let i = 0; i < p; i++) for (let j = 0; j < p; j++) gram[i * p + j] += row[i] * row[j];
   }
   return cholesky(gram, p, 1e-12) !== null;
 }
 
 function dot(x: Float64Array, y: Float64Array): number {
   let sum = 0;
-  for (let i = 0; i < x.length; i++) sum += x[i]! * y[i]!;
+  for (let i = 0; i < x.length; i++) sum += x[i] * y[i];
   return sum;
 }
 
@@ -65,16 +65,16 @@ function signedRows({ columns, design, n, k }: LinearProblem): Float64Array[] {
   const scale = new Float64Array(columns);
   for (let i = 0; i < n.length; i++) {
     for (let j = 0; j < columns; j++) {
-      scale[j] = Math.max(scale[j]!, Math.abs(design[i * columns + j]!));
+      scale[j] = Math.max(scale[j], Math.abs(design[i * columns + j]));
     }
   }
   const rows: Float64Array[] = [];
   for (let i = 0; i < n.length; i++) {
     const row = Float64Array.from({ length: columns }, (_, j) =>
-      scale[j]! > 0 ? design[i * columns + j]! / scale[j]! : 0,
+      scale[j] > 0 ? design[i * columns + j] / scale[j] : 0,
     );
-    if (k[i]! > 0) rows.push(row);
-    if (k[i]! < n[i]!) rows.push(row.map((x) => -x));
+    if (k[i] > 0) rows.push(row);
+    if (k[i] < n[i]) rows.push(row.map((x) => -x));
   }
   return rows;
 }
@@ -92,7 +92,7 @@ function bestDirection(rows: readonly Float64Array[], p: number): Float64Array |
   const basis = new Int32Array(constraints);
   rows.forEach((row, i) => {
     for (let j = 0; j < p; j++) {
-      tableau[i * stride + j] = -row[j]!;
+      tableau[i * stride + j] = -row[j];
       tableau[i * stride + p + j] = row[j]!;
     }
     tableau[i * stride + 2 * p + i] = 1;
@@ -109,7 +109,7 @@ function bestDirection(rows: readonly Float64Array[], p: number): Float64Array |
   for (let pivots = 0; pivots < 50 * (constraints + width); pivots++) {
     let enter = -1;
     for (let j = 0; j < stride - 1; j++) {
-      if (tableau[objective + j]! > EPS) {
+      if (tableau[objective + j] > EPS) {
         enter = j;
         break;
       }
@@ -118,10 +118,10 @@ function bestDirection(rows: readonly Float64Array[], p: number): Float64Array |
     let leave = -1;
     let ratio = Infinity;
     for (let i = 0; i < constraints; i++) {
-      const x = tableau[i * stride + enter]!;
+      const x = tableau[i * stride + enter];
       if (x <= EPS) continue;
-      const r = tableau[i * stride + stride - 1]! / x;
-      if (r < ratio - 1e-12 || (r < ratio + 1e-12 && basis[i]! < basis[leave]!)) {
+      const r = tableau[i * stride + stride - 1] / x;
+      if (r < ratio - 1e-12 || (r < ratio + 1e-12 && basis[i] < basis[leave])) {
         ratio = Math.min(r, ratio);
         leave = i;
       }
@@ -130,24 +130,24 @@ function bestDirection(rows: readonly Float64Array[], p: number): Float64Array |
     pivot(tableau, stride, constraints + 1, leave, enter);
     basis[leave] = enter;
   }
-  if (!(-tableau[objective + stride - 1]! > EPS)) return null;
+  if (!(-tableau[objective + stride - 1] > EPS)) return null;
   const beta = new Float64Array(p);
   for (let i = 0; i < constraints; i++) {
-    const at = basis[i]!;
-    const value = tableau[i * stride + stride - 1]!;
-    if (at < p) beta[at]! += value;
-    else if (at < 2 * p) beta[at - p]! -= value;
+    const at = basis[i];
+    const value = tableau[i * stride + stride - 1];
+    if (at < p) beta[at] += value;
+    else if (at < 2 * p) beta[at - p] -= value;
   }
   return beta;
 }
 
 function pivot(t: Float64Array, stride: number, rows: number, row: number, column: number): void {
   const at = row * stride;
-  const by = t[at + column]!;
-  for (let j = 0; j < stride; j++) t[at + j]! /= by;
+  const by = t[at + column];
+  for (let j = 0; j < stride; j++) t[at + j] /= by;
   for (let i = 0; i < rows; i++) {
-    const factor = t[i * stride + column]!;
+    const factor = t[i * stride + column];
     if (i === row || factor === 0) continue;
-    for (let j = 0; j < stride; j++) t[i * stride + j]! -= factor * t[at + j]!;
+    for (let j = 0; j < stride; j++) t[i * stride + j] -= factor * t[at + j];
   }
 }

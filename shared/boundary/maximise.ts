@@ -25,12 +25,12 @@ export interface MaximiseOptions {
 /** Spreads the free parameters over all groups' intercepts; returns the slope. */
 function expand(constraint: Constraint, free: Float64Array, a: Float64Array): number {
   const { reps, rep, constant, onSlope, onExtra, fixedSlope } = constraint;
-  const b = fixedSlope ?? free[reps]!;
-  const extra = onExtra ? free[reps + (fixedSlope === null ? 1 : 0)]! : 0;
+  const b = fixedSlope ?? free[reps];
+  const extra = onExtra ? free[reps + (fixedSlope === null ? 1 : 0)] : 0;
   for (let g = 0; g < a.length; g++) {
-    const r = rep[g]!;
+    const r = rep[g];
     a[g] =
-      (r < 0 ? 0 : free[r]!) + constant[g]! + onSlope[g]! * b + (onExtra ? onExtra[g]! * extra : 0);
+      (r < 0 ? 0 : free[r]) + constant[g] + onSlope[g] * b + (onExtra ? onExtra[g] * extra : 0);
   }
   return b;
 }
@@ -50,19 +50,19 @@ function projectMatrix(
   const slopeFree = c.fixedSlope === null;
   if (slopeFree) core[0] = bb;
   for (let g = 0; g < aa.length; g++) {
-    const r = c.rep[g]!;
-    const d = aa[g]!;
-    const s = c.onSlope[g]!;
-    if (r >= 0) diagonal[r]! += d;
+    const r = c.rep[g];
+    const d = aa[g];
+    const s = c.onSlope[g];
+    if (r >= 0) diagonal[r] += d;
     if (slopeFree) {
-      const mixed = ab[g]! + s * d;
-      if (r >= 0) border[r]! += mixed;
-      core[0]! += s * (ab[g]! + mixed);
+      const mixed = ab[g] + s * d;
+      if (r >= 0) border[r] += mixed;
+      core[0] += s * (ab[g] + mixed);
       if (c.onExtra) {
-        const e = c.onExtra[g]!;
-        if (r >= 0) border[reps + r]! += e * d;
-        core[1]! += e * mixed;
-        core[3]! += e * e * d;
+        const e = c.onExtra[g];
+        if (r >= 0) border[reps + r] += e * d;
+        core[1] += e * mixed;
+        core[3] += e * e * d;
       }
     }
   }
@@ -73,18 +73,18 @@ function projectVector(c: Constraint, onA: Float64Array, onB: number, into: Floa
   const slopeFree = c.fixedSlope === null;
   if (slopeFree) into[c.reps] = onB;
   for (let g = 0; g < onA.length; g++) {
-    const r = c.rep[g]!;
-    if (r >= 0) into[r]! += onA[g]!;
+    const r = c.rep[g];
+    if (r >= 0) into[r] += onA[g];
     if (slopeFree) {
-      into[c.reps]! += c.onSlope[g]! * onA[g]!;
-      if (c.onExtra) into[c.reps + 1]! += c.onExtra[g]! * onA[g]!;
+      into[c.reps] += c.onSlope[g] * onA[g];
+      if (c.onExtra) into[c.reps + 1] += c.onExtra[g] * onA[g];
     }
   }
 }
 
 function dot(x: Float64Array, y: Float64Array): number {
   let sum = 0;
-  for (let i = 0; i < x.length; i++) sum += x[i]! * y[i]!;
+  for (let i = 0; i < x.length; i++) sum += x[i] * y[i];
   return sum;
 }
 
@@ -146,7 +146,7 @@ export function maximise(
       projectVector(constraint, model.rankA, model.rankB, rank);
       positive = solveArrow(arrow, rank, solved);
       const factor = (0.5 * dot(rank, step)) / (1 + 0.5 * dot(rank, solved));
-      for (let i = 0; i < dimension; i++) step[i]! -= factor * solved[i]!;
+      for (let i = 0; i < dimension; i++) step[i] -= factor * solved[i];
     }
     let decrement = dot(gradient, step);
     if (!positive || !(decrement >= 0)) {
@@ -155,12 +155,12 @@ export function maximise(
       decrement = dot(gradient, step);
     }
     if (decrement < tolerance * (1 + Math.abs(value))) {
-      for (let i = 0; i < dimension; i++) free[i]! += step[i]!;
+      for (let i = 0; i < dimension; i++) free[i] += step[i];
       return finish('converged', iteration, decrement / 2);
     }
     let accepted = false;
     for (let t = 1; t > 1e-12; t /= 2) {
-      for (let i = 0; i < dimension; i++) trial[i] = free[i]! + t * step[i]!;
+      for (let i = 0; i < dimension; i++) trial[i] = free[i] + t * step[i];
       const next = evaluateAt(trial);
       if (
         next >= value + 1e-4 * t * decrement ||

@@ -42,11 +42,11 @@ export function mlSupremum(
   const anchored = emptyOrder();
   let hasAnchor = false;
   for (let i = 0; i < cells.size; i++) {
-    const g = groupOf[cells.configuration[i]!]!;
-    const r = rep[g]!;
+    const g = groupOf[cells.configuration[i]];
+    const r = rep[g];
     if (r < 0) hasAnchor = true;
-    const order = r < 0 ? anchored : orders[r]!;
-    addToOrder(order, cells.z[i]! + onSlope[g]!, cells.k[i]!, cells.n[i]! - cells.k[i]!);
+    const order = r < 0 ? anchored : orders[r];
+    addToOrder(order, cells.z[i] + onSlope[g], cells.k[i], cells.n[i] - cells.k[i]);
   }
   const remains = orders.map(hasBoth);
 
@@ -85,21 +85,21 @@ export function mlSupremum(
     let sum = 0;
     const out = new Float64Array(7);
     for (let i = 0; i < cells.size; i++) {
-      const g = groupOf[cells.configuration[i]!]!;
-      const r = rep[g]!;
-      const t = cells.z[i]! + onSlope[g]!;
-      const k = cells.k[i]!;
-      const h = cells.n[i]! - k;
+      const g = groupOf[cells.configuration[i]];
+      const r = rep[g];
+      const t = cells.z[i] + onSlope[g];
+      const k = cells.k[i];
+      const h = cells.n[i] - k;
       if (r < 0) {
         if (Math.abs(t) > TIE) continue;
-        link.at(constant[g]!, out);
-        sum += (k > 0 ? k * out[0]! : 0) + (h > 0 ? h * out[1]! : 0);
-      } else if (remains[r] && Math.abs(t - tied[r]!) <= TIE) {
-        slips[r]! += k;
-        holds[r]! += h;
+        link.at(constant[g], out);
+        sum += (k > 0 ? k * out[0] : 0) + (h > 0 ? h * out[1] : 0);
+      } else if (remains[r] && Math.abs(t - tied[r]) <= TIE) {
+        slips[r] += k;
+        holds[r] += h;
       }
     }
-    for (let r = 0; r < reps; r++) sum += binomialLogLik(slips[r]!, holds[r]!);
+    for (let r = 0; r < reps; r++) sum += binomialLogLik(slips[r], holds[r]);
     return sum;
   }
 
@@ -115,14 +115,14 @@ export function mlSupremum(
     const reduced: Constraint = {
       ...constraint,
       reps: left,
-      rep: Int32Array.from(rep, (r) => (r < 0 ? -1 : place[r]!)),
+      rep: Int32Array.from(rep, (r) => (r < 0 ? -1 : place[r])),
     };
     const from = start.filter((_, i) => i >= reps || remains[i]);
     rep.forEach((r, g) => (model.skip[g] = r >= 0 && !remains[r] ? 1 : 0));
     const fit = maximise(model, reduced, 'none', from, { tolerance });
     model.skip.fill(0);
     const free = Float64Array.from(start);
-    for (let r = 0; r < reps; r++) if (remains[r]) free[r] = fit.free[place[r]!]!;
+    for (let r = 0; r < reps; r++) if (remains[r]) free[r] = fit.free[place[r]]!;
     free.set(fit.free.subarray(left), reps);
     return { ...fit, free, logLik: fit.value, attained: false };
   }

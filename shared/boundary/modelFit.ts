@@ -19,9 +19,9 @@ export function aicc(logLik: number, p: number, n: number): number | null {
 export function arrowCovariance(information: Information, shift: readonly number[]): number[][] {
   const { weight, mean, spread } = information;
   const slope = 1 / spread.reduce((sum, v) => sum + v, 0);
-  const m = [...mean].map((value, g) => value - shift[g]!);
+  const m = [...mean].map((value, g) => value - shift[g]);
   const rows = m.map((own, g) => [
-    ...m.map((other, h) => own * other * slope + (g === h ? 1 / weight[g]! : 0)),
+    ...m.map((other, h) => own * other * slope + (g === h ? 1 / weight[g] : 0)),
     -own * slope,
   ]);
   return [...rows, [...m.map((own) => -own * slope), slope]];

@@ -24,9 +24,9 @@ function cellsOf(cells: Cells, configuration: number): Cells {
     size: rows.length,
     configurations: 1,
     configuration: new Int32Array(rows.length),
-    z: Float64Array.from(rows, (i) => cells.z[i]!),
-    n: Float64Array.from(rows, (i) => cells.n[i]!),
-    k: Float64Array.from(rows, (i) => cells.k[i]!),
+    z: Float64Array.from(rows, (i) => cells.z[i]),
+    n: Float64Array.from(rows, (i) => cells.n[i]),
+    k: Float64Array.from(rows, (i) => cells.k[i]),
   };
 }
 
@@ -67,7 +67,7 @@ function solve(
     const { status, a, b, value, logLik } = fit.penalised;
     if (status === 'singular') return 'singular';
     const covariance = arrowCovariance(fit.information, shift);
-    const natural = a.map((own, g) => own + b * shift[g]!);
+    const natural = a.map((own, g) => own + b * shift[g]);
     return { a: natural, b, logLik, penalisedLogLik: value, covariance };
   }
   const { attained, a, b, logLik } = fit.supremum;
@@ -77,7 +77,7 @@ function solve(
   const information = informationAt(model, a, b);
   model.evaluate(a, b, 'common');
   return {
-    a: a.map((own, g) => own + b * shift[g]!),
+    a: a.map((own, g) => own + b * shift[g]),
     b,
     logLik,
     penalisedLogLik: model.value,
@@ -137,7 +137,7 @@ function describeSeparate(
   trials: number,
 ): ModelFit {
   const parts = fits.map((fit, c) =>
-    fit === null ? 'singular' : solve(fit, penalised, [shifts[c]!]),
+    fit === null ? 'singular' : solve(fit, penalised, [shifts[c]]),
   );
   const names = labels.flatMap((label) => [`${label} intercept`, `${label} slope`]);
   const result = unfitted('converged', names);
@@ -151,15 +151,15 @@ function describeSeparate(
       penalisedLogLik = NaN;
       return;
     }
-    const own = modelFit('converged', ['a', 'b'], [part.a[0]!, part.b], part.covariance, 0, 0, 0);
+    const own = modelFit('converged', ['a', 'b'], [part.a[0], part.b], part.covariance, 0, 0, 0);
     own.coefficients.forEach(({ estimate, se }, i) => {
-      Object.assign(result.coefficients[2 * c + i]!, { estimate, se });
-      own.covariance[i]!.forEach((value, j) => (result.covariance[2 * c + i]![2 * c + j] = value));
+      Object.assign(result.coefficients[2 * c + i], { estimate, se });
+      own.covariance[i].forEach((value, j) => (result.covariance[2 * c + i][2 * c + j] = value));
     });
     labels.forEach((_, other) => {
       if (other === c || typeof parts[other] === 'string') return;
       for (const i of [0, 1])
-        for (const j of [0, 1]) result.covariance[2 * c + i]![2 * other + j] = 0;
+        for (const j of [0, 1]) result.covariance[2 * c + i][2 * other + j] = 0;
     });
     logLik += part.logLik;
     penalisedLogLik += part.penalisedLogLik;

@@ -34,12 +34,12 @@ export function fitPower(data: BoundaryData, link: LinkFunction, penalised: bool
   for (let i = 0; i < cells.size; i++) {
     design[3 * i] = 1;
     design[3 * i + 1] = cells.z[i]!;
-    design[3 * i + 2] = lnJ[cells.configuration[i]!]! - meanLnInertia;
+    design[3 * i + 2] = lnJ[cells.configuration[i]] - meanLnInertia;
   }
   const problem: LinearProblem = { columns: COLUMNS, design, n: cells.n, k: cells.k, link };
   const fit = fitLinear(problem, penalised);
   const separation = penalised ? 'none' : linearSeparation(problem, fit);
-  const [a, b, c] = [fit.beta[0]!, fit.beta[1]!, fit.beta[2]!];
+  const [a, b, c] = [fit.beta[0], fit.beta[1], fit.beta[2]];
   // rows: intercept = a − b·centre − c·mean, lnAcceleration = b, lnInertia = b + c
   const turn = [1, -centre, -meanLnInertia, 0, 1, 0, 0, 1, 1];
   const natural = Float64Array.from([a - b * centre - c * meanLnInertia, b, b + c]);
@@ -53,7 +53,7 @@ function sandwich(t: readonly number[], covariance: Float64Array): Float64Array 
     for (let j = 0; j < 3; j++) {
       let sum = 0;
       for (let k = 0; k < 3; k++) {
-        for (let l = 0; l < 3; l++) sum += t[3 * i + k]! * covariance[3 * k + l]! * t[3 * j + l]!;
+        for (let l = 0; l < 3; l++) sum += t[3 * i + k] * covariance[3 * k + l] * t[3 * j + l];
       }
       result[3 * i + j] = sum;
     }
@@ -85,10 +85,10 @@ export function exponentInterval(
   const none = { estimate: null, lower: null, upper: null };
   if (fit.status !== 'converged') return { ...none, absence: 'not fitted' };
   if (!penalised && separation !== 'none') return { ...none, absence: 'separated' };
-  const b = fit.beta[1]!;
+  const b = fit.beta[1];
   if (!(b > NO_SLOPE)) return { ...none, absence: 'falling' };
-  const estimate = 1 + fit.beta[2]! / b;
-  let warm = Float64Array.from([fit.beta[0]!, b]);
+  const estimate = 1 + fit.beta[2] / b;
+  let warm = Float64Array.from([fit.beta[0], b]);
   const from = (k: number, start: Float64Array) =>
     fitLinear(problem, penalised, exponentAt(k), start);
   const deviance = (there: LinearFit) => Math.max(0, 2 * (fit.value - there.value));
@@ -96,12 +96,12 @@ export function exponentInterval(
     at(k) {
       const there = from(k, warm);
       if (there.status === 'converged') warm = Float64Array.from(there.free);
-      return { deviance: deviance(there), slope: -2 * there.beta[1]! * there.gradient[2]! };
+      return { deviance: deviance(there), slope: -2 * there.beta[1] * there.gradient[2] };
     },
     surely(k) {
       let best = from(k, warm);
       for (const factor of [-1, 0.2, 3]) {
-        const there = from(k, Float64Array.from([fit.beta[0]!, factor * b]));
+        const there = from(k, Float64Array.from([fit.beta[0], factor * b]));
         if (there.status === 'converged' && there.value > best.value + 1e-9) best = there;
       }
       warm = Float64Array.from(best.free);
@@ -109,7 +109,7 @@ export function exponentInterval(
     },
   };
   const level = fitLinear(problem, penalised, withCoefficient(COLUMNS, 1, 0));
-  const se = Math.sqrt(Math.max(1e-12, fit.covariance![8]!)) / b;
+  const se = Math.sqrt(Math.max(1e-12, fit.covariance![8])) / b;
   const search = {
     from: estimate,
     crit,

@@ -32,8 +32,8 @@ function outcomesOf(fit: CommonSlopeFit, group: number): { slips: boolean; holds
   const { cells, groupOf } = fit.model;
   const order = emptyOrder();
   for (let i = 0; i < cells.size; i++) {
-    if (groupOf[cells.configuration[i]!] !== group) continue;
-    addToOrder(order, cells.z[i]!, cells.k[i]!, cells.n[i]! - cells.k[i]!);
+    if (groupOf[cells.configuration[i]] !== group) continue;
+    addToOrder(order, cells.z[i], cells.k[i], cells.n[i] - cells.k[i]);
   }
   return { slips: order.highestSlipped > -Infinity, holds: order.highestHeld > -Infinity };
 }
@@ -76,7 +76,7 @@ function intervalOf(ask: Ask): ProfileInterval {
     low = Math.min(low, value);
     high = Math.max(high, value);
   }
-  const weight = Math.max(fit.information.weight[ask.quantity.group]!, 1e-12);
+  const weight = Math.max(fit.information.weight[ask.quantity.group], 1e-12);
   const scale = Math.min(1 / (b * Math.sqrt(weight)), high - low);
   const range = ask.difference ? ([low - high, high - low] as const) : ([low, high] as const);
   const search = { from, crit, scale, range };
@@ -113,7 +113,7 @@ export function quantileInterval(
       group,
       constraintAt: (x) => quantileAt(fit.model.groups, group, eta, x),
     },
-    estimateOf: (a, b) => (eta - a[group]!) / b,
+    estimateOf: (a, b) => (eta - a[group]) / b,
     difference: false,
     basis,
     crit,
@@ -140,7 +140,7 @@ export function shiftInterval(
       group,
       constraintAt: (delta) => shiftedBy(fit.model.groups, group, delta),
     },
-    estimateOf: (a, b) => (a[0]! - a[group]!) / b,
+    estimateOf: (a, b) => (a[0] - a[group]) / b,
     difference: true,
     basis,
     crit,

@@ -37,7 +37,7 @@ export function penalisedProfile(fit: CommonSlopeFit, quantity: Quantity): Profi
         tolerance: TOLERANCE,
       });
       if (there.status === 'converged') warm = there.free;
-      return { deviance: deviance(there), slope: 2 * there.b * there.gradA[quantity.group]! };
+      return { deviance: deviance(there), slope: 2 * there.b * there.gradA[quantity.group] };
     },
     surely(x) {
       const constraint = quantity.constraintAt(x);
@@ -59,7 +59,7 @@ export function plainProfile(fit: CommonSlopeFit, quantity: Quantity): Profile {
     if (warm === null) {
       warm = new Float64Array(constraint.reps + 1);
       for (let g = 0; g < model.groups; g++) {
-        const r = constraint.rep[g]!;
+        const r = constraint.rep[g];
         if (r >= 0) warm[r] = penalised.a[g]!;
       }
       warm[constraint.reps] = penalised.b;
@@ -67,8 +67,7 @@ export function plainProfile(fit: CommonSlopeFit, quantity: Quantity): Profile {
     const there = mlSupremum(model, constraint, warm, TOLERANCE);
     if (there.free && there.status === 'converged') warm = there.free;
     const deviance = Math.max(0, 2 * (supremum.logLik - there.logLik));
-    const slope =
-      there.gradA && there.b !== null ? 2 * there.b * there.gradA[quantity.group]! : NaN;
+    const slope = there.gradA && there.b !== null ? 2 * there.b * there.gradA[quantity.group] : NaN;
     return { deviance, slope };
   };
   return { at, surely: (x) => at(x).deviance };

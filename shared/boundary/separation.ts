@@ -8,8 +8,8 @@ export type SeparationKind = (typeof separationKinds)[number];
 export function ordersByConfiguration(cells: Cells): Order[] {
   const orders = Array.from({ length: cells.configurations }, emptyOrder);
   for (let i = 0; i < cells.size; i++) {
-    const order = orders[cells.configuration[i]!]!;
-    addToOrder(order, cells.z[i]!, cells.k[i]!, cells.n[i]! - cells.k[i]!);
+    const order = orders[cells.configuration[i]];
+    addToOrder(order, cells.z[i], cells.k[i], cells.n[i] - cells.k[i]);
   }
   return orders;
 }
@@ -25,7 +25,7 @@ export function separation(cells: Cells): {
 } {
   const all = emptyOrder();
   for (let i = 0; i < cells.size; i++) {
-    addToOrder(all, cells.z[i]!, cells.k[i]!, cells.n[i]! - cells.k[i]!);
+    addToOrder(all, cells.z[i], cells.k[i], cells.n[i] - cells.k[i]);
   }
   return {
     overall: separationAlong(all),

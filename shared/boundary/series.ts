@@ -34,8 +34,8 @@ export function splitSeries(
     const run = group.every((trial) => trial.order !== undefined)
       ? [...group].sort((x, y) => x.order! - y.order!)
       : group;
-    const last = run[run.length - 1]!;
-    const rises = run.every((t, i) => i === 0 || t.acceleration > run[i - 1]!.acceleration);
+    const last = run[run.length - 1];
+    const rises = run.every((t, i) => i === 0 || t.acceleration > run[i - 1].acceleration);
     const endsInSlip = run.every((t) => failed(t) === (t === last));
     if (run.length < 2 || !rises || !endsInSlip) continue;
     run.forEach((trial) => stepped.add(trial));
@@ -43,7 +43,7 @@ export function splitSeries(
       series: last.series!,
       configuration: last.configuration,
       trials: run.length,
-      lastHeld: run[run.length - 2]!.acceleration,
+      lastHeld: run[run.length - 2].acceleration,
       slipped: last.acceleration,
     });
   }

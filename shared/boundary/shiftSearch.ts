@@ -70,7 +70,7 @@ export function shiftSearch(
     }
     const delta = (c: number) => {
       const { a, b } = own[c]!.penalised;
-      return Math.abs((a[0]! - a[found.length + 1]!) / b);
+      return Math.abs((a[0] - a[found.length + 1]) / b);
     };
     const tested = remaining.filter((c) => p[c] !== null);
     const worst = tested.reduce<number | null>((best, c) => {
@@ -81,7 +81,7 @@ export function shiftSearch(
       if (Math.abs(mineDelta - itsDelta) > 1e-9 * Math.max(mineDelta, itsDelta)) {
         return mineDelta > itsDelta ? c : best;
       }
-      return labels[c]! < labels[best]! ? c : best;
+      return labels[c] < labels[best] ? c : best;
     }, null);
     const significant = worst !== null && p[worst]! * remaining.length < 1 - confidence;
     if (!significant) return { found, noCommonCurve: false, p, common, own };

@@ -63,7 +63,7 @@ export function notesOf(
   }
   const target = `α at ${percent(settings.target)}`;
   fit.configurations.forEach((own, c) => {
-    const { label, trials } = configurations[c]!;
+    const { label, trials } = configurations[c];
     if (trials === 0) notes.push(`${label}: no trial is left in the fit.`);
     if (configurations.length > 1) explain(`${label}: α₅₀ by offsets`, own.alpha50.offsets);
     explain(`${label}: ${target}`, own.target);
@@ -73,7 +73,7 @@ export function notesOf(
         `${label}: ${target} is extrapolated, ${count(trials, 'trial')} cannot show it directly.`,
       );
     }
-    const result = configurations[c]!;
+    const result = configurations[c];
     if (result.demonstrated === null)
       notes.push(`${label}: no demonstrated limit, ${undemonstrated(fit, request, c)}.`);
     if (result.workingLimit === null) {
@@ -126,10 +126,10 @@ function singular(name: string): string {
 }
 
 function undemonstrated(fit: BoundaryFit, request: JudgeRequest, c: number): string {
-  if (fit.configurations[c]!.demonstrated === null) {
+  if (fit.configurations[c].demonstrated === null) {
     return 'its lower bound does not exist under every model it must hold for';
   }
-  const own = fit.data.configurations[c]!;
+  const own = fit.data.configurations[c];
   if (
     judgedByMark(own) &&
     (request.moveAngle === undefined || request.smallestVisibleSlip === undefined)

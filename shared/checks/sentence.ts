@@ -114,15 +114,15 @@ export function fixtureSentence(
     const size = exponent === null ? '' : ` (exponent ${digits(exponent, 2)} where theory says 1)`;
     parts.push(`The torque changes along the positions${size}; no single one is to blame.`);
   }
-  if (configurations.length === 1) parts.push(configurations[0]!.sentence);
+  if (configurations.length === 1) parts.push(configurations[0].sentence);
   else if (verdict === 'in line')
     parts.push(`All ${configurations.length} configurations are in line.`);
   else if (concerned.length === configurations.length) {
-    parts.push(`All ${concerned.length} configurations: ${verdict}.`, concerned[0]!.sentence);
+    parts.push(`All ${concerned.length} configurations: ${verdict}.`, concerned[0].sentence);
   } else if (concerned.length === 1) {
-    parts.push(concerned[0]!.sentence);
+    parts.push(concerned[0].sentence);
   } else {
-    parts.push(`${concerned.map((c) => c.label).join(', ')}: ${verdict}.`, concerned[0]!.sentence);
+    parts.push(`${concerned.map((c) => c.label).join(', ')}: ${verdict}.`, concerned[0].sentence);
   }
   const { estimate, lower, upper } = facts.mu50;
   if (estimate !== null) parts.push(`Fitted μ ${digits(estimate)} (${range(lower, upper)}).`);

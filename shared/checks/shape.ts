@@ -10,7 +10,7 @@ export function shapeCheck(
   c: number,
   tolerance: number,
 ): ConfigurationResult['shape'] {
-  const own = fit.configurations[c]!;
+  const own = fit.configurations[c];
   const { estimate: ratio, lower, upper } = own.ratio;
   if (fit.configurations.length === 1) {
     return { ratio: null, lower: null, upper: null, p: null, state: 'not applicable' };

@@ -18,15 +18,15 @@ export function cholesky(a: Float64Array, size: number, tolerance = 1e-14): Chol
   let logDet = 0;
   for (let j = 0; j < size; j++) {
     const row = j * size;
-    let pivot = a[row + j]!;
-    for (let k = 0; k < j; k++) pivot -= lower[row + k]! ** 2;
-    if (!(pivot > tolerance * Math.abs(a[row + j]!)) || pivot === Infinity) return null;
+    let pivot = a[row + j];
+    for (let k = 0; k < j; k++) pivot -= lower[row + k] ** 2;
+    if (!(pivot > tolerance * Math.abs(a[row + j])) || pivot === Infinity) return null;
     const root = Math.sqrt(pivot);
     lower[row + j] = root;
     logDet += Math.log(pivot);
     for (let i = j + 1; i < size; i++) {
-      let sum = a[i * size + j]!;
-      for (let k = 0; k < j; k++) sum -= lower[i * size + k]! * lower[row + k]!;
+      let sum = a[i * size + j];
+      for (let k = 0; k < j; k++) sum -= lower[i * size + k] * lower[row + k];
       lower[i * size + j] = sum / root;
     }
   }
@@ -38,14 +38,14 @@ export function solveCholesky(factor: Cholesky, b: Float64Array): Float64Array {
   const { size, lower } = factor;
   const x = Float64Array.from(b);
   for (let i = 0; i < size; i++) {
-    let sum = x[i]!;
-    for (let k = 0; k < i; k++) sum -= lower[i * size + k]! * x[k]!;
-    x[i] = sum / lower[i * size + i]!;
+    let sum = x[i];
+    for (let k = 0; k < i; k++) sum -= lower[i * size + k] * x[k];
+    x[i] = sum / lower[i * size + i];
   }
   for (let i = size - 1; i >= 0; i--) {
-    let sum = x[i]!;
-    for (let k = i + 1; k < size; k++) sum -= lower[k * size + i]! * x[k]!;
-    x[i] = sum / lower[i * size + i]!;
+    let sum = x[i];
+    for (let k = i + 1; k < size; k++) sum -= lower[k * size + i] * x[k];
+    x[i] = sum / lower[i * size + i];
   }
   return x;
 }

@@ -1,0 +1,33 @@
+import 'reflect-metadata';
+import { DataSource } from 'typeorm';
+import { EventRow } from './entities/EventRow.ts';
+import { User } from './entities/User.ts';
+import { UserSession } from './entities/UserSession.ts';
+import type { DatabaseSettings } from './env.ts';
+import { migrations } from './migrations/all.ts';
+
+export const poolSize = 10;
+
+/**
+ * The one data source. Every connection starts with UTC, strict mode, snapshot isolation that
+ * reports lost updates (error 1020), and a limit on the time of a statement.
+ */
+export function createDataSource(database: DatabaseSettings, size = poolSize): DataSource {
+  return new DataSource({
+    type: 'mariadb',
+    host: database.host,
+    port: database.port,
+    username: database.user,
+    password: database.password,
+    database: database.database,
+    charset: 'utf8mb4_unicode_ci',
+    timezone: 'Z',
+    entities: [User, UserSession, EventRow],
+    migrations,
+    migrationsTransactionMode: 'none',
+    invalidWhereValuesBehavior: { null: 'throw', undefined: 'throw' },
+    connectTimeout: 2500,
+    poolSize: size,
+    extra: { resetOnRelease: true, idleTimeout: 60_000 },
+  });
+}

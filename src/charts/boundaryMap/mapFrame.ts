@@ -60,8 +60,9 @@ function yExtent(scene: MapScene, columns: readonly MapColumn[], yLog: boolean):
   const heights = scene.trials
     .filter((trial) => labels.has(trial.configuration))
     .map((trial) => trial.acceleration);
-  for (const { alpha50, holding, lettingGo, workingLimit } of columns) {
-    for (const height of [alpha50.estimate, holding, lettingGo, workingLimit]) {
+  for (const { inertia, alpha50, holding, lettingGo, workingLimit } of columns) {
+    const limit = scene.limitTorque === null ? null : scene.limitTorque / inertia;
+    for (const height of [alpha50.estimate, holding, lettingGo, workingLimit, limit]) {
       if (height !== null && height > 0) heights.push(height);
     }
   }

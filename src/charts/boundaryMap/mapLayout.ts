@@ -15,7 +15,7 @@ export function mapLayout(scene: MapScene, frame: MapFrame, theme: ChartTheme): 
       ...axis(frame.y, frame.yLog),
       title: { text: 'acceleration, rad/s²', standoff: 8 },
     },
-    margin: { t: 34, r: 12, b: 48, l: 58 },
+    margin: { t: 40, r: 12, b: 48, l: 58 },
     shapes: highlight(scene, frame, theme),
     annotations: columnHeads(scene, frame, theme),
   };
@@ -84,9 +84,9 @@ function highlight(scene: MapScene, frame: MapFrame, theme: ChartTheme): Layout[
 }
 
 function columnHeads(scene: MapScene, frame: MapFrame, theme: ChartTheme): Layout['annotations'] {
-  return frame.columns.map(({ x, label }) => {
+  return frame.columns.map(({ x, label, setApart }) => {
     const chosen = label === scene.chosen;
-    const text = escapeMarkup(label);
+    const text = `${escapeMarkup(label)}${setApart ? '<br>★ set apart' : ''}`;
     return {
       xref: 'x',
       yref: 'paper',

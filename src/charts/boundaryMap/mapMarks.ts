@@ -141,8 +141,8 @@ function fittedTrace(columns: readonly MapColumn[], setApart: boolean, theme: Ch
     ),
     hoverinfo: 'text',
     marker: {
-      symbol: setApart ? 'star-square' : 'square',
-      size: setApart ? 13 : 9,
+      symbol: setApart ? 'star' : 'square',
+      size: setApart ? 15 : 9,
       color: theme.ink,
       line: { color: theme.paper, width: 1 },
     },

@@ -191,7 +191,7 @@ describe('the boundary map', () => {
       ...(data as ScatterData[]).flatMap(({ hovertext }) => hovertext ?? []),
     ];
     expect(texts.length).toBeGreaterThan(0);
-    for (const text of texts) expect(text.replaceAll(/<\/?b>/g, '')).not.toMatch(/[<>]/);
+    for (const text of texts) expect(text.replaceAll(/<\/?b>|<br>/g, '')).not.toMatch(/[<>]/);
   });
 
   it('draws a single configuration', () => {

@@ -32,8 +32,8 @@ describe('engineeringScale', () => {
 });
 
 describe('spreadColumn', () => {
-  it('lets marks that stand apart stay in the middle', () => {
-    expect(spreadColumn([1, 2, 3], 0.5)).toEqual([0, 0, 0]);
+  it('stands marks that do not touch in one lane beside the middle', () => {
+    expect(spreadColumn([1, 2, 3], 0.5)).toEqual([1, 1, 1]);
   });
 
   it('puts equal marks at different steps', () => {
@@ -44,6 +44,7 @@ describe('spreadColumn', () => {
         (n, height) => {
           const steps = spreadColumn(new Array<number>(n).fill(height), 0.1);
           expect(new Set(steps).size).toBe(n);
+          expect(steps).not.toContain(0);
         },
       ),
     );

@@ -1,5 +1,6 @@
 import {
   type LogField,
+  logFields,
   type LogMapping,
   type LogProblem,
 } from '../../../shared/schemas/trialLog.ts';
@@ -52,4 +53,15 @@ export function unknownOutcomeWords(
       : [],
   );
   return [...new Set(words)].filter((word) => !known.has(word));
+}
+
+/**
+ * The whole answer to "which column is what": a meaning no column has is sent with an empty name,
+ * which tells the intake not to look for it again.
+ */
+export function explicitColumns(columns: Columns): Record<LogField, string> {
+  return Object.fromEntries(logFields.map((field) => [field, columns[field] ?? ''])) as Record<
+    LogField,
+    string
+  >;
 }

@@ -1,5 +1,5 @@
 import type { Cells, Partition } from './cells.ts';
-import type { LinkFunction } from './link.ts';
+import { createCellTerms, type LinkFunction } from './link.ts';
 
 /**
  * none: ℓ; common: ℓ + ½ ln det I of "one intercept per group, one slope"; separate: the same
@@ -16,8 +16,8 @@ export interface CommonSlope {
   groups: number;
   groupOf: Int32Array;
   link: LinkFunction;
-  /** Groups marked 1 take no part in the unpenalised likelihood. */
-  skip: Uint8Array;
+  /** Whether a penalised likelihood with several local maxima must be reckoned with. */
+  careful: boolean;
   logLik: number;
   /** logLik + penalty. */
   value: number;
@@ -35,6 +35,8 @@ export interface CommonSlope {
   infoAB: Float64Array;
   infoBB: number;
   evaluate: (a: Float64Array, b: number, penalty: Penalty) => void;
+  /** Takes the trials of some groups out of the unpenalised likelihood (and puts all others back). */
+  leaveOut: (groups: (group: number) => boolean) => void;
 }
 
 /**
@@ -50,27 +52,34 @@ export function createCommonSlope(
   partition: Partition,
   link: LinkFunction,
 ): CommonSlope {
-  const { size, configuration, z, n, k } = cells;
+  const { size, configuration } = cells;
   const G = partition.groups;
-  const group = Int32Array.from(configuration, (c) => partition.groupOf[c]);
-  const out = new Float64Array(7);
-  const w = new Float64Array(size);
-  const w1 = new Float64Array(size);
-  const w2 = new Float64Array(size);
+  const groupAt = (i: number) => partition.groupOf[configuration[i]];
+  // cells sorted by group, so that every sum runs over a stretch
+  const order = Int32Array.from(cells.z.keys()).sort((i, j) => groupAt(i) - groupAt(j));
+  const start = new Int32Array(G + 1);
+  for (let i = 0; i < size; i++) start[groupAt(i) + 1]++;
+  for (let g = 0; g < G; g++) start[g + 1] += start[g];
+  const z = Float64Array.from(order, (i) => cells.z[i]);
+  const n = Float64Array.from(order, (i) => cells.n[i]);
+  const k = Float64Array.from(order, (i) => cells.k[i]);
+  const eta = new Float64Array(size);
+  const terms = createCellTerms(size);
+  const { score, curve, w, w1, w2 } = terms;
   const sumW = new Float64Array(G);
   const sumWz = new Float64Array(G);
+  // per group: weighted mean m, V = Σw(z − m)², Σw′(z − m)^j (0–3), Σw″(z − m)^j (0–4)
   const mean = new Float64Array(G);
-  // moments about the weighted mean: Σw′u^j (0–3), Σw″u^j (0–4), Σwu²
+  const V = new Float64Array(G);
   const P = new Float64Array(4 * G);
   const R = new Float64Array(5 * G);
-  const V = new Float64Array(G);
 
   const model: CommonSlope = {
     cells,
     groups: G,
     groupOf: partition.groupOf,
     link,
-    skip: new Uint8Array(G),
+    careful: true,
     logLik: NaN,
     value: NaN,
     gradA: new Float64Array(G),
@@ -84,81 +93,86 @@ export function createCommonSlope(
     infoAB: sumWz,
     infoBB: 0,
     evaluate,
+    leaveOut,
   };
 
+  function leaveOut(groups: (group: number) => boolean): void {
+    for (let g = 0; g < G; g++) {
+      const out = groups(g);
+      for (let i = start[g]; i < start[g + 1]; i++) {
+        n[i] = out ? 0 : cells.n[order[i]];
+        k[i] = out ? 0 : cells.k[order[i]];
+      }
+    }
+  }
+
   function evaluate(a: Float64Array, b: number, penalty: Penalty): void {
-    const { gradA, hessAA, hessAB, skip } = model;
-    gradA.fill(0);
-    hessAA.fill(0);
-    hessAB.fill(0);
-    sumW.fill(0);
-    sumWz.fill(0);
-    let logLik = 0;
+    for (let g = 0; g < G; g++) {
+      const own = a[g];
+      for (let i = start[g]; i < start[g + 1]; i++) eta[i] = own + b * z[i];
+    }
+    model.logLik = link.terms(eta, n, k, terms);
+    model.value = model.logLik;
     let gradB = 0;
     let hessBB = 0;
     let infoBB = 0;
-    for (let i = 0; i < size; i++) {
-      const g = group[i];
-      if (skip[g] === 1) continue;
-      const zi = z[i];
-      link.at(a[g] + b * zi, out);
-      const slips = k[i];
-      const holds = n[i] - slips;
-      const r1 = out[2];
-      const r0 = out[3];
-      const g1 = out[4];
-      const g0 = out[5];
-      if (slips > 0) logLik += slips * out[0];
-      if (holds > 0) logLik += holds * out[1];
-      const score = slips * r1 - holds * r0;
-      const curve = holds * r0 * g0 - slips * r1 * g1;
-      gradA[g] += score;
-      gradB += score * zi;
-      hessAA[g] += curve;
-      hessAB[g] += curve * zi;
-      hessBB += curve * zi * zi;
-      const wi = n[i] * r1 * r0;
-      const u = g1 + g0;
-      w[i] = wi;
-      w1[i] = wi * u;
-      w2[i] = wi * (u * u + out[6]);
-      sumW[g] += wi;
-      sumWz[g] += wi * zi;
-      infoBB += wi * zi * zi;
+    for (let g = 0; g < G; g++) {
+      let [u0, h0, h1, s, t] = [0, 0, 0, 0, 0];
+      for (let i = start[g]; i < start[g + 1]; i++) {
+        const zi = z[i];
+        u0 += score[i];
+        gradB += score[i] * zi;
+        const h = curve[i];
+        h0 += h;
+        h1 += h * zi;
+        hessBB += h * zi * zi;
+        const wi = w[i];
+        s += wi;
+        t += wi * zi;
+        infoBB += wi * zi * zi;
+      }
+      model.gradA[g] = u0;
+      model.hessAA[g] = h0;
+      model.hessAB[g] = h1;
+      sumW[g] = s;
+      sumWz[g] = t;
     }
-    model.logLik = logLik;
-    model.value = logLik;
     model.gradB = gradB;
     model.hessBB = hessBB;
     model.infoBB = infoBB;
-    model.rankA.fill(0);
-    model.rankB = 0;
     if (penalty !== 'none') penalise(penalty);
   }
 
   function penalise(penalty: 'common' | 'separate'): void {
-    P.fill(0);
-    R.fill(0);
-    V.fill(0);
-    for (let g = 0; g < G; g++) mean[g] = sumWz[g] / sumW[g];
-    for (let i = 0; i < size; i++) {
-      const g = group[i];
-      const u = z[i] - mean[g];
-      const u2 = u * u;
-      V[g] += w[i] * u2;
-      const p = w1[i];
-      const r = w2[i];
-      const at = 4 * g;
-      P[at] += p;
-      P[at + 1] += p * u;
-      P[at + 2] += p * u2;
-      P[at + 3] += p * u2 * u;
-      const to = 5 * g;
-      R[to] += r;
-      R[to + 1] += r * u;
-      R[to + 2] += r * u2;
-      R[to + 3] += r * u2 * u;
-      R[to + 4] += r * u2 * u2;
+    model.rankA.fill(0);
+    model.rankB = 0;
+    for (let g = 0; g < G; g++) {
+      const m = sumWz[g] / sumW[g];
+      let [v, p0, p1, p2, p3] = [0, 0, 0, 0, 0];
+      let [r0, r1, r2, r3, r4] = [0, 0, 0, 0, 0];
+      for (let i = start[g]; i < start[g + 1]; i++) {
+        const u = z[i] - m;
+        const u2 = u * u;
+        v += w[i] * u2;
+        const p = w1[i];
+        const pu = p * u;
+        p0 += p;
+        p1 += pu;
+        p2 += p * u2;
+        p3 += pu * u2;
+        const r = w2[i];
+        const ru = r * u;
+        const ru2 = r * u2;
+        r0 += r;
+        r1 += ru;
+        r2 += ru2;
+        r3 += ru * u2;
+        r4 += ru2 * u2;
+      }
+      mean[g] = m;
+      V[g] = v;
+      P.set([p0, p1, p2, p3], 4 * g);
+      R.set([r0, r1, r2, r3, r4], 5 * g);
     }
     let total = 0;
     for (let g = 0; g < G; g++) total += V[g];

@@ -28,19 +28,22 @@ const LN_MAX = 690;
  */
 export function findEnd(profiles: readonly Profile[], search: EndSearch): number | null {
   let from = search.from;
+  // the estimate lies inside by definition
+  let inside = profiles[0];
   for (let round = 0; round < 50; round++) {
-    const inside = profiles.find((profile) => profile.surely(from) <= search.crit + 1e-8);
-    if (!inside) return round === 0 ? null : from;
     const end = follow(inside, { ...search, from });
     if (end === null) return null;
-    if (Math.abs(end - from) <= 1e-12 * (1 + Math.abs(end)) && round > 0) return end;
-    const others = profiles.filter((profile) => profile !== inside);
-    if (
-      inside.surely(end) >= search.crit - 1e-7 &&
-      others.every((profile) => profile.surely(end) >= search.crit - 1e-7)
-    ) {
-      return end;
+    const stuck = round > 0 && Math.abs(end - from) <= 1e-12 * (1 + Math.abs(end));
+    if (stuck) return end;
+    let lowest = Infinity;
+    for (const profile of profiles) {
+      const deviance = profile.surely(end);
+      if (deviance < lowest) {
+        lowest = deviance;
+        inside = profile;
+      }
     }
+    if (lowest >= search.crit - 1e-7) return end;
     from = end;
   }
   return from;
@@ -63,6 +66,12 @@ function follow(profile: Profile, search: EndSearch): number | null {
     step = Math.min(Math.max(expected, step / 8), step * 3);
     const near = inside > range[0] - longest && inside < range[1] + longest;
     if (near) step = Math.min(step, longest);
+    else {
+      // from outside the range, halt where it begins
+      const entry = direction > 0 ? range[0] : range[1];
+      const ahead = direction * (entry - inside);
+      if (ahead > 0) step = Math.min(step, ahead);
+    }
     const next = inside + direction * step;
     if (Math.abs(next) > LN_MAX) return null;
     const there = profile.at(next);

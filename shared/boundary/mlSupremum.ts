@@ -118,9 +118,9 @@ export function mlSupremum(
       rep: Int32Array.from(rep, (r) => (r < 0 ? -1 : place[r])),
     };
     const from = start.filter((_, i) => i >= reps || remains[i]);
-    rep.forEach((r, g) => (model.skip[g] = r >= 0 && !remains[r] ? 1 : 0));
+    model.leaveOut((g) => rep[g] >= 0 && !remains[rep[g]]);
     const fit = maximise(model, reduced, 'none', from, { tolerance });
-    model.skip.fill(0);
+    model.leaveOut(() => false);
     const free = Float64Array.from(start);
     for (let r = 0; r < reps; r++) if (remains[r]) free[r] = fit.free[place[r]]!;
     free.set(fit.free.subarray(left), reps);

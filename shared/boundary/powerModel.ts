@@ -1,5 +1,5 @@
 import type { BoundaryData } from './collect.ts';
-import { findEnd, type Profile } from './findEnd.ts';
+import { findEnd } from './findEnd.ts';
 import {
   fitLinear,
   withCoefficient,
@@ -8,6 +8,7 @@ import {
   type LinearProblem,
 } from './fitLinear.ts';
 import type { LinkFunction } from './link.ts';
+import { linearProfile } from './linearProfile.ts';
 import { linearSeparation } from './linearSeparation.ts';
 import { NO_SLOPE, type Absence } from './profileInterval.ts';
 import type { SeparationKind } from './separation.ts';
@@ -88,26 +89,11 @@ export function exponentInterval(
   const b = fit.beta[1];
   if (!(b > NO_SLOPE)) return { ...none, absence: 'falling' };
   const estimate = 1 + fit.beta[2] / b;
-  let warm = Float64Array.from([fit.beta[0], b]);
-  const from = (k: number, start: Float64Array) =>
-    fitLinear(problem, penalised, exponentAt(k), start);
-  const deviance = (there: LinearFit) => Math.max(0, 2 * (fit.value - there.value));
-  const profile: Profile = {
-    at(k) {
-      const there = from(k, warm);
-      if (there.status === 'converged') warm = Float64Array.from(there.free);
-      return { deviance: deviance(there), slope: -2 * there.beta[1] * there.gradient[2] };
-    },
-    surely(k) {
-      let best = from(k, warm);
-      for (const factor of [-1, 0.2, 3]) {
-        const there = from(k, Float64Array.from([fit.beta[0], factor * b]));
-        if (there.status === 'converged' && there.value > best.value + 1e-9) best = there;
-      }
-      warm = Float64Array.from(best.free);
-      return deviance(best);
-    },
-  };
+  const profile = linearProfile(problem, fit, penalised, {
+    constraintAt: exponentAt,
+    starts: [1, -1, 0.2, 3].map((factor) => Float64Array.from([fit.beta[0], factor * b])),
+    slopeOf: (there) => there.beta[1] * there.gradient[2],
+  });
   const level = fitLinear(problem, penalised, withCoefficient(COLUMNS, 1, 0));
   const se = Math.sqrt(Math.max(1e-12, fit.covariance![8])) / b;
   const search = {
@@ -116,7 +102,7 @@ export function exponentInterval(
     scale: se,
     range: [estimate - 4 * se, estimate + 4 * se] as const,
   };
-  const absent = deviance(level) <= crit;
+  const absent = 2 * (fit.value - level.value) <= crit;
   return {
     estimate: absent ? null : estimate,
     lower: findEnd([profile], { ...search, direction: -1 }),

@@ -10,9 +10,21 @@ export function normalCdf(x: number): number {
   return normalCdfOf(x, 0, 1);
 }
 
-/** Standard normal quantile Φ⁻¹(p), 0 < p < 1. */
+/**
+ * Standard normal quantile Φ⁻¹(p), 0 < p < 1. The library's value loses digits in the lower tail
+ * (it works with 1 − p), so two Newton steps on ln Φ follow there.
+ */
 export function normalQuantile(p: number): number {
-  return normalQuantileOf(p, 0, 1);
+  let x = normalQuantileOf(p, 0, 1);
+  if (!(p > 0 && p < 0.1)) return x;
+  if (x === -Infinity) x = -Math.sqrt(-2 * Math.log(p));
+  for (let i = 0; i < 6; i++) {
+    const cdf = normalCdf(x);
+    const step = (Math.log(cdf / p) * cdf * Math.sqrt(2 * Math.PI)) / Math.exp(-0.5 * x * x);
+    x -= step;
+    if (Math.abs(step) < 1e-15 * Math.abs(x)) break;
+  }
+  return x;
 }
 
 /** Quantile of Student's t with `df` degrees of freedom. */

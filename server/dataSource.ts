@@ -1,6 +1,14 @@
 import 'reflect-metadata';
 import { DataSource } from 'typeorm';
+import { AnalysisRow } from './entities/AnalysisRow.ts';
+import { BoundaryCacheRow } from './entities/BoundaryCacheRow.ts';
+import { BuildUpRow } from './entities/BuildUpRow.ts';
+import { ConfigurationRow } from './entities/ConfigurationRow.ts';
 import { EventRow } from './entities/EventRow.ts';
+import { FixtureRow } from './entities/FixtureRow.ts';
+import { FrictionTestRow } from './entities/FrictionTestRow.ts';
+import { TrialLogRow } from './entities/TrialLogRow.ts';
+import { TrialRow } from './entities/TrialRow.ts';
 import { User } from './entities/User.ts';
 import { UserSession } from './entities/UserSession.ts';
 import type { DatabaseSettings } from './env.ts';
@@ -22,7 +30,19 @@ export function createDataSource(database: DatabaseSettings, size = poolSize): D
     database: database.database,
     charset: 'utf8mb4_unicode_ci',
     timezone: 'Z',
-    entities: [User, UserSession, EventRow],
+    entities: [
+      User,
+      UserSession,
+      EventRow,
+      FixtureRow,
+      BuildUpRow,
+      ConfigurationRow,
+      FrictionTestRow,
+      TrialLogRow,
+      TrialRow,
+      AnalysisRow,
+      BoundaryCacheRow,
+    ],
     migrations,
     migrationsTransactionMode: 'none',
     invalidWhereValuesBehavior: { null: 'throw', undefined: 'throw' },

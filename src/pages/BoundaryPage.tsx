@@ -1,0 +1,3 @@
+export function BoundaryPage() {
+  return <h1>Boundary</h1>;
+}

@@ -1,0 +1,3 @@
+export function BuildUpPage() {
+  return <h1>BuildUp</h1>;
+}

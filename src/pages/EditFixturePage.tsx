@@ -1,0 +1,3 @@
+export function EditFixturePage() {
+  return <h1>EditFixture</h1>;
+}

@@ -1,0 +1,3 @@
+export function FixturesPage() {
+  return <h1>Fixtures</h1>;
+}

@@ -1,0 +1,3 @@
+export function GripPage() {
+  return <h1>Grip</h1>;
+}

@@ -1,0 +1,3 @@
+export function HistoryPage() {
+  return <h1>History</h1>;
+}

@@ -1,0 +1,3 @@
+export function NewFixturePage() {
+  return <h1>NewFixture</h1>;
+}

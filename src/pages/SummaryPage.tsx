@@ -1,0 +1,3 @@
+export function SummaryPage() {
+  return <h1>Summary</h1>;
+}

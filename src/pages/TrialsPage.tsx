@@ -1,0 +1,3 @@
+export function TrialsPage() {
+  return <h1>Trials</h1>;
+}

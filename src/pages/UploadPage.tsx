@@ -1,0 +1,3 @@
+export function UploadPage() {
+  return <h1>Upload</h1>;
+}

@@ -2,6 +2,7 @@ import { Link } from 'react-router';
 import { type Boundary, type ConfigurationResult, type Interval } from '../../../shared/schemas/analysis.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
+import { VerdictWord } from '../../charts/VerdictWord.tsx';
 import { judgedAlpha50 } from './mapSceneOf.ts';
 
 interface PositionListProps {
@@ -35,7 +36,7 @@ export function PositionList(props: PositionListProps) {
           >
             <span className="flex flex-wrap items-baseline justify-between gap-x-3">
               <span className="font-bold text-ink">{one.label}</span>
-              <VerdictMark verdict={one.verdict} />
+              <VerdictWord verdict={one.verdict} />
             </span>
             <Line name="half slip at" value={formatRange(judgedAlpha50(one, commonTorque50))} />
             <Line

@@ -3,7 +3,7 @@ import { checkWords, type CheckWords } from './checkWords.ts';
 
 const tones: Record<CheckWords['tone'], { mark: string; className: string }> = {
   good: { mark: '✓', className: 'text-accent' },
-  doubt: { mark: '?', className: 'text-slipped-text' },
+  doubt: { mark: '?', className: 'text-ink' },
   bad: { mark: '✕', className: 'text-lost' },
   quiet: { mark: '–', className: 'text-muted' },
 };

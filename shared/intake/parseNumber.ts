@@ -23,11 +23,11 @@ export function parseNumber(written: string, decimal: Decimal): ParsedNumber {
   if (text.includes(other)) {
     if (/^[+-]?[0-9]{1,3}[.,][0-9]{3}$/.test(text)) {
       return refuse(
-        `is ambiguous: ${other} may part thousands or decimals; this log uses a decimal ${shown}`,
+        `is ambiguous: its “${other}” may part thousands or decimals; this log uses a decimal ${shown}`,
       );
     }
     return refuse(
-      `has a ${other} while this log uses a decimal ${shown}: choose the decimal sign, or write it one way`,
+      `has a “${other}” while this log uses a decimal ${shown}: choose the decimal sign, or write it one way`,
     );
   }
   const plain = decimal === ',' ? text.replace(',', '.') : text;

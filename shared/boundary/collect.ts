@@ -1,5 +1,6 @@
 import type { AnalysisRequest, AnalysisTrial } from '../schemas/analysis.ts';
 import type { Cells } from './cells.ts';
+import { TIE } from './order.ts';
 import { splitSeries, type StepUpSeries } from './series.ts';
 
 /** One configuration with what the fit and the checks need of it. */
@@ -123,6 +124,15 @@ export function collect(request: CollectRequest): BoundaryData {
   return { configurations, cells, centre, referenceTorque, sent: request.trials, series };
 }
 
+/** Makes predictors equal that differ by no more than the tie tolerance, so that ties are exact. */
+function snapTies(rows: { z: number }[]): void {
+  let anchor = -Infinity;
+  for (const row of [...rows].sort((x, y) => x.z - y.z)) {
+    if (row.z - anchor <= TIE) row.z = anchor;
+    else anchor = row.z;
+  }
+}
+
 function toCells(
   configurations: readonly ConfigurationData[],
   counts: readonly Map<number, { n: number; k: number }>[],
@@ -138,6 +148,7 @@ function toCells(
         k,
       }));
   });
+  snapTies(rows);
   const centre = rows.reduce((sum, row) => sum + row.z, 0) / Math.max(1, rows.length);
   return {
     centre,

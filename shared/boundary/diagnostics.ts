@@ -1,5 +1,5 @@
+import { EigenvalueDecomposition, Matrix } from 'ml-matrix';
 import type { AnalysisTrial } from '../schemas/analysis.ts';
-import { cholesky, solveCholesky } from '../numeric/cholesky.ts';
 import { chiSquareUpper } from '../numeric/distributions.ts';
 import type { BoundaryData } from './collect.ts';
 import type { CommonSlopeFit } from './fitCommonSlope.ts';
@@ -36,7 +36,7 @@ function judged(
 /**
  * Scatter beyond binomial, judged on the offsets model so that a shift does not count as scatter.
  * Pearson χ²/df over levels when most levels hold three trials or more (df = levels − intercepts −
- * 1); otherwise between seatings, or batches: the score test of one effect per cluster, rᵀC⁻r with
+ * 1); otherwise between seatings, or batches: the score test of one effect per cluster, rᵀC⁺r with
  * C the covariance of the clusters' residual sums given the fit.
  *
  * @source Finney 1971, Probit Analysis, 4.5 (heterogeneity factor); McCullagh & Nelder 1989, 4.5
@@ -126,34 +126,22 @@ function betweenClusters(
       covariance[s * clusters + t] = value - levers[s] * levers[t] * slopeVariance;
     }
   }
-  const kept = independent(covariance, own, clusters);
-  if (kept.length === 0) return null;
-  const size = kept.length;
-  const reduced = Float64Array.from(
-    kept.flatMap((s) => kept.map((t) => covariance[s * clusters + t])),
+  // the fit ties the residual sums together: a generalised inverse leaves those directions out
+  const { realEigenvalues, eigenvectorMatrix } = new EigenvalueDecomposition(
+    Matrix.from1DArray(clusters, clusters, covariance),
+    { assumeSymmetric: true },
   );
-  const factor = cholesky(reduced, size, 1e-10);
-  if (!factor) return null;
-  const r = Float64Array.from(kept, (s) => residual[s]);
-  const solved = solveCholesky(factor, r);
-  const statistic = solved.reduce((sum, x, i) => sum + x * r[i], 0);
-  return judged(statistic, size, between, clusters);
-}
-
-/** Clusters whose residual sums are linearly independent given the fit (pivots of an elimination). */
-function independent(matrix: Float64Array, scale: Float64Array, size: number): number[] {
-  const work = Float64Array.from(matrix);
-  const kept: number[] = [];
-  for (let j = 0; j < size; j++) {
-    const pivot = work[j * size + j];
-    if (!(pivot > 1e-8 * scale[j])) continue;
-    kept.push(j);
-    for (let i = j + 1; i < size; i++) {
-      const factor = work[i * size + j] / pivot;
-      for (let l = j; l < size; l++) work[i * size + l] -= factor * work[j * size + l];
-    }
-  }
-  return kept;
+  const largest = Math.max(...realEigenvalues);
+  let statistic = 0;
+  let df = 0;
+  realEigenvalues.forEach((value, e) => {
+    if (!(value > 1e-9 * largest)) return;
+    let along = 0;
+    for (let s = 0; s < clusters; s++) along += eigenvectorMatrix.get(s, e) * residual[s];
+    statistic += (along * along) / value;
+    df += 1;
+  });
+  return judged(statistic, df, between, clusters);
 }
 
 /**

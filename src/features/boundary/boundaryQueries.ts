@@ -16,21 +16,21 @@ const base = (id: number) => `/api/fixtures/${id}`;
 /** The analysis of the trials as they are now. */
 export const boundaryQuery = (id: number) =>
   queryOptions({
-    queryKey: ['fixtures', id, 'boundary'],
+    queryKey: ['fixture', id, 'boundary'],
     queryFn: ({ signal }) => api<Boundary>(`${base(id)}/boundary`, { signal }),
   });
 
 /** Every trial of the fixture, excluded ones included. */
 export const everyTrialQuery = (id: number) =>
   queryOptions({
-    queryKey: ['fixtures', id, 'trials', 'every'],
+    queryKey: ['fixture', id, 'trials', 'every'],
     queryFn: ({ signal }) => everyPage<Trial>(`${base(id)}/trials`, signal),
   });
 
 /** The drive's highest acceleration, rad/s². */
 export const driveLimitQuery = (id: number) =>
   queryOptions({
-    queryKey: ['fixtures', id, 'drive limit'],
+    queryKey: ['fixture', id, 'drive limit'],
     queryFn: async ({ signal }) =>
       (await api<Fixture>(base(id), { signal })).drive.maxAcceleration,
   });
@@ -38,7 +38,7 @@ export const driveLimitQuery = (id: number) =>
 /** What the friction tests say together. */
 export const benchFrictionQuery = (id: number) =>
   queryOptions({
-    queryKey: ['fixtures', id, 'bench friction'],
+    queryKey: ['fixture', id, 'bench friction'],
     queryFn: async ({ signal }) => {
       const tests = await api<FrictionTests>(`${base(id)}/friction-tests`, { signal });
       return { kinetic: tests.kinetic, static: tests.static };
@@ -48,7 +48,7 @@ export const benchFrictionQuery = (id: number) =>
 /** Analyses that were kept, newest first. */
 export const analysesQuery = (id: number) =>
   queryOptions({
-    queryKey: ['fixtures', id, 'analyses'],
+    queryKey: ['fixture', id, 'analyses'],
     queryFn: ({ signal }) => api<StoredAnalysisList>(`${base(id)}/analyses`, { signal }),
   });
 
@@ -58,6 +58,6 @@ export function useSaveAnalysis(id: number) {
   return useMutation({
     mutationFn: (input: StoredAnalysisInput) =>
       api<StoredAnalysis>(`${base(id)}/analyses`, { method: 'POST', body: input }),
-    onSuccess: () => client.invalidateQueries({ queryKey: ['fixtures', id] }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ['fixture', id] }),
   });
 }

@@ -74,7 +74,7 @@ export function mapSceneOf(
     view: knots.length === 0 ? 'inertia' : view.view,
     configurations,
     trials: trials.map((trial) => ({
-      id: String(trial.id),
+      id: trialMark(trial.id),
       configuration: trial.configuration,
       acceleration: trial.acceleration,
       outcome: trial.outcome,
@@ -87,4 +87,9 @@ export function mapSceneOf(
     driveLimit,
     inertiaAt: knots.length === 0 ? () => null : inertiaCurve(boundary.polynomial, knots),
   };
+}
+
+/** The name a trial's mark carries in the map, apart from any configuration's label. */
+export function trialMark(id: number): string {
+  return `trial ${id}`;
 }

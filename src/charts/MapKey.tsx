@@ -1,12 +1,6 @@
-import { type Outcome, outcomes } from '../../shared/schemas/trial.ts';
+import { outcomes } from '../../shared/schemas/trial.ts';
 import { MarkGlyph } from './MarkGlyph.tsx';
 import { outcomeMarks } from './outcomeMarks.ts';
-
-const outcomeClasses: Record<Outcome, string> = {
-  held: 'text-held',
-  slipped: 'text-slipped',
-  lost: 'text-lost',
-};
 
 const lines = {
   theory: { title: 'theory: holding to letting-go bound', dash: '5 3', className: 'text-ink', width: 1.5 },
@@ -26,7 +20,7 @@ export function MapKey({ drawn, excluded }: { drawn: readonly KeyLine[]; exclude
     >
       {outcomes.map((outcome) => (
         <li key={outcome}>
-          <MarkGlyph shape={outcomeMarks[outcome].symbol} className={outcomeClasses[outcome]} />{' '}
+          <MarkGlyph shape={outcomeMarks[outcome].symbol} className={outcomeMarks[outcome].textClass} />{' '}
           {outcomeMarks[outcome].word}
         </li>
       ))}

@@ -8,6 +8,8 @@ export interface OutcomeMark {
   symbol: MarkShape;
   excludedSymbol: MarkShape;
   color: (theme: ChartTheme) => string;
+  /** the same colour as a class, written out so that it is found and kept */
+  textClass: string;
 }
 
 export const outcomeMarks: Record<Outcome, OutcomeMark> = {
@@ -16,17 +18,20 @@ export const outcomeMarks: Record<Outcome, OutcomeMark> = {
     symbol: 'circle-open',
     excludedSymbol: 'circle-open-dot',
     color: (theme) => theme.held,
+    textClass: 'text-held',
   },
   slipped: {
     word: 'slipped',
     symbol: 'diamond',
     excludedSymbol: 'diamond-open-dot',
     color: (theme) => theme.slipped,
+    textClass: 'text-slipped',
   },
   lost: {
     word: 'lost',
     symbol: 'x-thin',
     excludedSymbol: 'x-open-dot',
     color: (theme) => theme.lost,
+    textClass: 'text-lost',
   },
 };

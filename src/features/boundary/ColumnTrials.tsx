@@ -28,7 +28,7 @@ export function ColumnTrials({ fixtureId, label, trials, marked }: ColumnTrialsP
         className="max-h-72 list-none overflow-y-auto border-t border-line px-3 py-1 text-sm"
       >
         {column.map((trial) => {
-          const { symbol, excludedSymbol, word } = outcomeMarks[trial.outcome];
+          const { symbol, excludedSymbol, textClass, word } = outcomeMarks[trial.outcome];
           return (
             <li
               key={trial.id}
@@ -41,7 +41,7 @@ export function ColumnTrials({ fixtureId, label, trials, marked }: ColumnTrialsP
               <span className={trial.excluded ? 'text-muted line-through' : ''}>
                 <MarkGlyph
                   shape={trial.excluded ? excludedSymbol : symbol}
-                  className={trial.excluded ? '' : `text-${trial.outcome}`}
+                  className={trial.excluded ? '' : textClass}
                 />{' '}
                 {word}
               </span>

@@ -4,11 +4,14 @@ import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 
 type Sort = (typeof trialSorts)[number];
 
+type SortKey = 'id' | 'acceleration' | 'configuration' | 'order' | 'outcome';
+
 /** One column of the trial table. */
 export interface TrialColumn {
   title: string;
+  unit?: string;
   /** the sort key of the server, where it can sort by it */
-  sort: 'id' | 'acceleration' | 'configuration' | 'order' | 'outcome' | null;
+  sort: SortKey | null;
   number: boolean;
   text: (trial: Trial) => string;
 }
@@ -17,14 +20,16 @@ export const trialColumns: readonly TrialColumn[] = [
   { title: 'Row', sort: 'id', number: true, text: ({ row }) => String(row) },
   { title: 'Configuration', sort: 'configuration', number: false, text: ({ configuration }) => configuration },
   {
-    title: 'Acceleration, rad/s²',
+    title: 'Acceleration',
+    unit: 'rad/s²',
     sort: 'acceleration',
     number: true,
     text: ({ acceleration }) => formatQuantity(acceleration, { digits: 4 }),
   },
   { title: 'Order', sort: 'order', number: true, text: ({ order }) => formatQuantity(order, { digits: 6, decimals: 0 }) },
   {
-    title: 'Slip, °',
+    title: 'Slip',
+    unit: '°',
     sort: null,
     number: true,
     text: ({ slipAngle }) => (slipAngle === null ? '–' : formatQuantity(fromRadians(slipAngle))),
@@ -36,7 +41,7 @@ export const trialColumns: readonly TrialColumn[] = [
 ];
 
 /** The sort after pressing a column's head: up first, then down. */
-export function nextSort(current: Sort, column: NonNullable<TrialColumn['sort']>): Sort {
+export function nextSort(current: Sort, column: SortKey): Sort {
   return current === column ? `-${column}` : column;
 }
 

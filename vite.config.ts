@@ -6,6 +6,7 @@ import { defineConfig } from 'vite';
 export default defineConfig(({ mode }) =>
   mode === 'server'
     ? {
+        publicDir: false,
         build: {
           ssr: true,
           target: 'node20',

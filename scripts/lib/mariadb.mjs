@@ -26,7 +26,7 @@ const asRoot = () => (process.getuid?.() === 0 ? ['--user=root'] : []);
  * behind is adopted, not fought: a second one on the same data would wait 30 s and fail.
  *
  * @param options.durable - false only for tests
- * @returns {Promise<{port: number, sql: (text: string) => string, stop: () => Promise<void>}>}
+ * @returns {Promise<{port: number, pid: number, socket: string, sql: (text: string) => string, stop: () => Promise<void>}>}
  */
 export async function startMariadb(folder, { durable = true } = {}) {
   mkdirSync(folder, { recursive: true, mode: 0o700 });
@@ -95,8 +95,7 @@ function isMariadb(pid) {
 }
 
 async function ready({ pid, port, socket }, log) {
-  const sql = (text) =>
-    output('mariadb', ['--no-defaults', `--socket=${socket}`, '-N', '-B'], { input: text });
+  const sql = (text) => sqlOver(socket, text);
   for (let tries = 0; ; tries += 1) {
     try {
       sql('SELECT 1');
@@ -108,7 +107,12 @@ async function ready({ pid, port, socket }, log) {
       await sleep(25);
     }
   }
-  return { port, pid, sql, stop: () => stop(pid) };
+  return { port, pid, socket, sql, stop: () => stop(pid) };
+}
+
+/** Runs statements as the database's root, who can come in by this socket only. */
+export function sqlOver(socket, text) {
+  return output('mariadb', ['--no-defaults', `--socket=${socket}`, '-N', '-B'], { input: text });
 }
 
 /** SIGTERM, then wait: InnoDB writes out what is in memory. */

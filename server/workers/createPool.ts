@@ -20,7 +20,11 @@ export type PoolOptions = {
 
 function workerFile(name: string): { filename: string; execArgv: string[] } {
   const source = fileURLToPath(new URL(`./${name}.ts`, import.meta.url));
-  if (existsSync(source)) return { filename: source, execArgv: ['--import', 'tsx'] };
+  if (existsSync(source))
+    return {
+      filename: source,
+      execArgv: ['--import', new URL('./registerTsx.mjs', import.meta.url).href],
+    };
   return { filename: fileURLToPath(new URL(`./${name}.js`, import.meta.url)), execArgv: [] };
 }
 

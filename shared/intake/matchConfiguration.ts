@@ -105,11 +105,11 @@ function freshLabel(
   return `${plain} (${number})`;
 }
 
-function sameLabel(a: string, b: string): boolean {
+/** Whether two labels are one: `70mm`, `70 MM` and ` 70 mm` are. */
+export function sameLabel(a: string, b: string): boolean {
   return bare(a) === bare(b);
 }
 
-/** `70mm`, `70 MM` and ` 70 mm` are one label. */
 function bare(label: string): string {
   return label.replace(/\s+/g, '').toLowerCase();
 }

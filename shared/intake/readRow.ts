@@ -5,6 +5,7 @@ import { toRadians } from '../units/angle.ts';
 import { toMillimetres } from '../units/length.ts';
 import {
   matchConfiguration,
+  sameLabel,
   type KnownConfiguration,
   type SlideRange,
 } from './matchConfiguration.ts';
@@ -172,9 +173,12 @@ function understand(record: LogRecord, settings: RowSettings): ReadRow {
   };
 
   // last, so that a refused row proposes no configuration
-  const label = word('configuration');
+  const named = knownLabel(cell('position'), settings.known);
+  const label = word('configuration') ?? named;
   const positionMm =
-    cell('position') === '' ? null : toMillimetres(number('position'), units.position);
+    cell('position') === '' || named !== null
+      ? null
+      : toMillimetres(number('position'), units.position);
   if (label === null && positionMm === null) {
     const field = columns.has('position') ? 'position' : 'configuration';
     refuse(field, 'is empty: say where the masses stood');
@@ -201,6 +205,12 @@ function understand(record: LogRecord, settings: RowSettings): ReadRow {
       ...optional,
     },
   };
+}
+
+/** A position column may hold the labels of configurations, such as “70 mm” or “inner”. */
+function knownLabel(text: string, known: readonly KnownConfiguration[]): string | null {
+  if (text === '' || /^[0-9.,+-]+$/.test(text)) return null;
+  return known.find(({ label }) => sameLabel(label, text))?.label ?? null;
 }
 
 /** A row with more cells than headers has slipped sideways, often by a decimal comma. */

@@ -1,5 +1,6 @@
 import { logFields, type LogField, type LogMappingInput } from '../schemas/trialLog.ts';
 import { readHeader } from './readHeader.ts';
+import { angleUnitOf } from './recogniseUnit.ts';
 
 /** A column that was given a meaning. */
 export type Column = { index: number; header: string; name: string; unit: string | null };
@@ -50,10 +51,12 @@ export function recogniseColumns(
   for (const [index, header] of headers.entries()) {
     if (taken.has(index)) continue;
     const { name, unit, meaning } = readHeader(header);
-    if (!meaning || settled.has(meaning.field)) continue;
-    const list = candidates.get(meaning.field) ?? [];
+    if (!meaning) continue;
+    const field = fieldOf(meaning.field, unit);
+    if (settled.has(field)) continue;
+    const list = candidates.get(field) ?? [];
     list.push({ index, header, name, unit, rank: meaning.rank });
-    candidates.set(meaning.field, list);
+    candidates.set(field, list);
   }
   for (const [field, list] of candidates) {
     list.sort((a, b) => a.rank - b.rank || (a.header < b.header ? -1 : 1));
@@ -70,6 +73,11 @@ export function recogniseColumns(
 }
 
 const asked = new Set<LogField>(['position', 'acceleration', 'outcome']);
+
+/** A slip in degrees or radians is how far it slipped, not whether. */
+function fieldOf(field: LogField, unit: string | null): LogField {
+  return field === 'outcome' && unit !== null && angleUnitOf(unit) ? 'slipAngle' : field;
+}
 
 /** A field's name in a sentence. */
 export function spoken(field: LogField): string {

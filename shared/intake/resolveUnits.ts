@@ -57,10 +57,18 @@ export function resolveUnits(columns: Columns, given: LogMappingInput['units']):
     acceleration: resolve('acceleration', given?.acceleration, accelerationUnitOf, 'rad/s²'),
     slipAngle: resolve('slipAngle', given?.slipAngle, angleUnitOf, '°'),
   };
-  const temperature = columns.get('temperature')?.unit ?? null;
+  const temperature = columns.get('temperature');
+  const written = temperature?.unit ?? '°C';
+  const temperatureUnit = temperatureUnitOf(written);
+  if (temperature && !temperatureUnit) {
+    troubles.push({
+      column: temperature.header,
+      reason: `The unit “${written}” of the temperature is not known here: leave the column out, or write °C, °F or K in its header.`,
+    });
+  }
   return {
     units,
-    temperatureUnit: (temperature === null ? undefined : temperatureUnitOf(temperature)) ?? '°C',
+    temperatureUnit: temperatureUnit ?? '°C',
     troubles,
     oddities,
   };

@@ -16,7 +16,7 @@ const centred: HeldPart = { mass: 1, eccentricity: 0 };
  *
  *   T = Iα + e·G,  F = m e √(α² + ω⁴) + G,  G the sideways weight of a tilted axis
  *
- * The ellipse overstates the exact capacity by up to 6.5 % (disc), 10 % (ring), 18 % (three pads).
+ * The exact capacity lies up to 6.6 % (disc), 10 % (ring), 18 % (three pads) below the ellipse.
  * A jerk limit lowers the peak speed; it is left out here, which errs on the safe side.
  *
  * @param inertia - about the fixture's axis (I_G + m e²), kg·m², > 0

@@ -95,6 +95,16 @@ describe('reading a plain log', () => {
     expect(rows[0]?.temperature).toBeCloseTo(100, 10);
   });
 
+  it('takes a slip in degrees for its size, not for the outcome', () => {
+    const { rows } = read('position mm,alpha_rad_per_s2,slip (deg),result\n70,5,90,slip\n');
+    expect(rows[0]).toMatchObject({ slipAngle: Math.PI / 2, outcome: 'slipped', acceleration: 5 });
+  });
+
+  it('asks about a temperature in a unit that is none', () => {
+    const { problems } = read('position mm,alpha rad/s²,outcome,temp (bar)\n70,5,held,3\n');
+    expect(problems[0]?.reason).toMatch(/The unit “bar” of the temperature is not known/);
+  });
+
   it('reads everything a row can say', () => {
     const { rows, oddities } = read(
       [
@@ -259,6 +269,14 @@ describe('positions and configurations', () => {
       expect.stringMatching(/“far” is not a configuration of this fixture \(20 mm, 70 mm\)/),
       expect.stringMatching(/is empty: say where the masses stood/),
     ]);
+  });
+
+  it('takes the label of a configuration written in the column of positions', () => {
+    const { rows, problems } = read(
+      'position mm,alpha rad/s²,outcome\n70 mm,5,held\n71 mm,5,held\n',
+    );
+    expect(rows.map(({ configurationId }) => configurationId)).toEqual([2]);
+    expect(problems[0]?.reason).toMatch(/“71 mm” is not a number: .* the unit in the header/);
   });
 
   it('refuses a label and a position that disagree, and notes a label it does not know', () => {

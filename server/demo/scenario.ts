@@ -20,7 +20,7 @@ import { runTrials } from './runTrials.ts';
 import { writeLog } from './writeLog.ts';
 
 /** A log as it would be uploaded; the bytes are the UTF-8 of `text`. */
-export type DemoLog = {
+type DemoLog = {
   fileName: string;
   text: string;
   /** ISO 8601 UTC. */
@@ -58,17 +58,12 @@ const plans: FixturePlan[] = [
 
 /**
  * The demo scenario: an invented maker of pump and valve parts with four lines. Everything in it
- * is made up, from seeds, so every call gives the same fixtures, tests and logs.
+ * is made up, from seeds, so every call gives the same fixtures, tests and logs. To seed, store
+ * each fixture, then its build-up, configurations and friction tests, then upload its logs in
+ * order; no log needs a mapping. `messyLog()` is left for the person who tries the upload.
  */
 export function demoScenario(): DemoFixture[] {
   return plans.map(demoFixture);
-}
-
-/** The plan of a fixture, for writing further logs of it. */
-export function demoPlan(code: string): FixturePlan {
-  const plan = plans.find(({ fixture }) => fixture.code === code);
-  if (!plan) throw new RangeError(`the demo has no fixture ${code}`);
-  return plan;
 }
 
 function demoFixture(plan: FixturePlan): DemoFixture {

@@ -11,7 +11,7 @@ export type Match =
  * Positions closer than this are the same: what a scale on the slide resolves, and far below what
  * changes an inertia.
  */
-export const positionToleranceMm = 0.05;
+const positionToleranceMm = 0.05;
 
 const room = positionToleranceMm * (1 + 1e-9);
 

@@ -3,7 +3,7 @@ import { readHeader } from './readHeader.ts';
 import { angleUnitOf } from './recogniseUnit.ts';
 
 /** A column that was given a meaning. */
-export type Column = { index: number; header: string; name: string; unit: string | null };
+type Column = { index: number; header: string; name: string; unit: string | null };
 
 export type Columns = Map<LogField, Column>;
 

@@ -25,7 +25,7 @@ export type TheoryConfiguration = Pick<Configuration, 'label' | 'positionMm' | '
 type TorquePerMu = { value: number; relativeUncertainty: number };
 
 /** One configuration as theory sees it; null where it cannot be had (see the notes). */
-export type ConfigurationTheory = {
+type ConfigurationTheory = {
   label: string;
   positionMm: number;
   /** kg·m² from the build-up. */

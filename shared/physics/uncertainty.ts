@@ -9,7 +9,7 @@ export type UncertainInput = {
 };
 
 /** What one input adds: ∂y/∂x and its share of the variance, 0 … 1. */
-export type Contribution = { name: string; sensitivity: number; share: number };
+type Contribution = { name: string; sensitivity: number; share: number };
 
 export type UncertaintyBudget = {
   value: number;

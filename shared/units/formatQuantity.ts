@@ -7,7 +7,7 @@ const largestPlain = 1e7;
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
 /** Decimals that give a value `digits` significant digits (never negative). */
-export function decimalsFor(value: number, digits = 3): number {
+function decimalsFor(value: number, digits = 3): number {
   if (!Number.isFinite(value) || value === 0) return digits - 1;
   return Math.max(0, digits - 1 - exponentOf(value));
 }

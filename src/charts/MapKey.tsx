@@ -3,8 +3,18 @@ import { MarkGlyph } from './MarkGlyph.tsx';
 import { outcomeMarks } from './outcomeMarks.ts';
 
 const lines = {
-  theory: { title: 'theory: holding to letting-go bound', dash: '5 3', className: 'text-ink', width: 1.5 },
-  fitted: { title: 'fitted: half slip, with its interval', dash: undefined, className: 'text-ink', width: 2 },
+  theory: {
+    title: 'theory: holding to letting-go bound',
+    dash: '5 3',
+    className: 'text-ink',
+    width: 1.5,
+  },
+  fitted: {
+    title: 'fitted: half slip, with its interval',
+    dash: undefined,
+    className: 'text-ink',
+    width: 2,
+  },
   limit: { title: 'working limit', dash: undefined, className: 'text-accent', width: 3 },
   drive: { title: 'drive limit', dash: '2 3', className: 'text-muted', width: 1.5 },
 } as const;
@@ -20,7 +30,10 @@ export function MapKey({ drawn, excluded }: { drawn: readonly KeyLine[]; exclude
     >
       {outcomes.map((outcome) => (
         <li key={outcome}>
-          <MarkGlyph shape={outcomeMarks[outcome].symbol} className={outcomeMarks[outcome].textClass} />{' '}
+          <MarkGlyph
+            shape={outcomeMarks[outcome].symbol}
+            className={outcomeMarks[outcome].textClass}
+          />{' '}
           {outcomeMarks[outcome].word}
         </li>
       ))}
@@ -31,7 +44,11 @@ export function MapKey({ drawn, excluded }: { drawn: readonly KeyLine[]; exclude
       )}
       {drawn.map((name) => (
         <li key={name} className="whitespace-nowrap">
-          <svg viewBox="0 0 24 8" aria-hidden="true" className={`inline-block h-2 w-6 ${lines[name].className}`}>
+          <svg
+            viewBox="0 0 24 8"
+            aria-hidden="true"
+            className={`inline-block h-2 w-6 ${lines[name].className}`}
+          >
             <path
               d="M0 4h24"
               stroke="currentColor"

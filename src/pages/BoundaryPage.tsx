@@ -1,5 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
-import { boundaryQuery, driveLimitQuery, everyTrialQuery } from '../features/boundary/boundaryQueries.ts';
+import {
+  boundaryQuery,
+  driveLimitQuery,
+  everyTrialQuery,
+} from '../features/boundary/boundaryQueries.ts';
 import { BoundaryScreen } from '../features/boundary/BoundaryScreen.tsx';
 import { NoBoundary } from '../features/boundary/NoBoundary.tsx';
 import { useFixtureId } from '../lib/useFixtureId.ts';

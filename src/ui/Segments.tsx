@@ -8,7 +8,12 @@ type SegmentsProps<Value extends string> = {
 };
 
 /** One of a few, side by side: a radio group that looks like a switch. */
-export function Segments<Value extends string>({ label, value, options, onChange }: SegmentsProps<Value>) {
+export function Segments<Value extends string>({
+  label,
+  value,
+  options,
+  onChange,
+}: SegmentsProps<Value>) {
   const name = useId();
   return (
     <fieldset className="inline-flex overflow-hidden rounded-md border border-control print:hidden">

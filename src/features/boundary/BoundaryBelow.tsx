@@ -9,13 +9,24 @@ import { SavedAnalyses } from './SavedAnalyses.tsx';
 import { trustWords } from './trustWords.ts';
 
 /** The numbers, what speaks for and against them, and how they came about. */
-export function BoundaryBelow({ boundary, result }: { boundary: Boundary; result: AnalysisResult }) {
+export function BoundaryBelow({
+  boundary,
+  result,
+}: {
+  boundary: Boundary;
+  result: AnalysisResult;
+}) {
   const { options, digest, fixtureId } = boundary;
   return (
     <div className="space-y-4">
       <Panel title="Numbers">
         <FrictionLine fixtureId={fixtureId} result={result} />
-        <div className="mt-4 overflow-x-auto" tabIndex={0} role="region" aria-label="Numbers of each configuration">
+        <div
+          className="mt-4 overflow-x-auto"
+          tabIndex={0}
+          role="region"
+          aria-label="Numbers of each configuration"
+        >
           <NumbersTable configurations={result.configurations} target={options.target} />
         </div>
       </Panel>

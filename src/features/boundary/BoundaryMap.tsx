@@ -63,7 +63,10 @@ export function BoundaryMap(props: BoundaryMapProps) {
         alternative={mapAlternative(result, scene.view)}
         height="h-[24rem] sm:h-[30rem]"
         chartKey={
-          <MapKey drawn={keyLines(boundary, driveLimit)} excluded={trials.some((one) => one.excluded)} />
+          <MapKey
+            drawn={keyLines(boundary, driveLimit)}
+            excluded={trials.some((one) => one.excluded)}
+          />
         }
         tableTitle="The picture as a table"
         table={<MapTable configurations={result.configurations} trials={trials} />}

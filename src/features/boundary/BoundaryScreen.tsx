@@ -43,7 +43,9 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
     <>
       <PageHeader
         title="Boundary"
-        actions={maySave ? <SaveAnalysis fixtureId={fixtureId} options={boundary.options} /> : undefined}
+        actions={
+          maySave ? <SaveAnalysis fixtureId={fixtureId} options={boundary.options} /> : undefined
+        }
       >
         <p>{result.sentence}</p>
       </PageHeader>
@@ -51,8 +53,8 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
         <div className="mb-4 space-y-2">
           {excluded > 0 && (
             <Notice>
-              {excluded === 1 ? 'One trial is excluded' : `${excluded} trials are excluded`} by hand and
-              does not count here.{' '}
+              {excluded === 1 ? 'One trial is excluded' : `${excluded} trials are excluded`} by hand
+              and does not count here.{' '}
               <Link to={`/fixtures/${fixtureId}/trials?excluded=true`}>See which, and why</Link>
             </Notice>
           )}
@@ -91,7 +93,12 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
                 Why {chosen.label} is {chosen.verdict}
               </h2>
               <WhyPanel configuration={chosen} options={boundary.options} />
-              <ColumnTrials fixtureId={fixtureId} label={chosen.label} trials={trials} marked={marked} />
+              <ColumnTrials
+                fixtureId={fixtureId}
+                label={chosen.label}
+                trials={trials}
+                marked={marked}
+              />
             </section>
           )}
         </div>

@@ -45,10 +45,14 @@ export function ColumnTrials({ fixtureId, label, trials, marked }: ColumnTrialsP
                 />{' '}
                 {word}
               </span>
-              <Link to={`/fixtures/${fixtureId}/trials?log=${trial.logId}&configuration=${encodeURIComponent(label)}`}>
+              <Link
+                to={`/fixtures/${fixtureId}/trials?log=${trial.logId}&configuration=${encodeURIComponent(label)}`}
+              >
                 row {trial.row}
               </Link>
-              {trial.excluded && <span className="text-muted">excluded: {trial.excludedReason}</span>}
+              {trial.excluded && (
+                <span className="text-muted">excluded: {trial.excludedReason}</span>
+              )}
             </li>
           );
         })}

@@ -38,8 +38,8 @@ export function HowComputed({
         </li>
         <li>
           Shape: step-down search. Of all configurations the one that departs most is set apart
-          first, tested with the number of those remaining, then the next. Its trials still inform the
-          steepness.
+          first, tested with the number of those remaining, then the next. Its trials still inform
+          the steepness.
         </li>
         <li>
           Level: the interval of half slip against the holding bound (kinetic friction) and the
@@ -47,8 +47,8 @@ export function HowComputed({
         </li>
         <li>
           Margin: the limit judged is theory less {percent(options.margin)}; exact binomial count of
-          slips at or below it (Clopper and Pearson 1934) and the one-sided bound of the acceleration
-          at which {percent(options.target)} slip.
+          slips at or below it (Clopper and Pearson 1934) and the one-sided bound of the
+          acceleration at which {percent(options.target)} slip.
         </li>
         <li>
           Working limit: {options.rule}, capped by the drive and rounded down to its resolution.

@@ -37,7 +37,9 @@ export function MapTable({
             {(['held', 'slipped', 'lost'] as const).map((outcome) => (
               <td key={outcome} className="py-1 pr-3 tabular-nums">
                 {listed(
-                  trials.filter((trial) => trial.configuration === label && trial.outcome === outcome),
+                  trials.filter(
+                    (trial) => trial.configuration === label && trial.outcome === outcome,
+                  ),
                 )}
               </td>
             ))}

@@ -11,7 +11,13 @@ const statusWords: Record<ModelFit['status'], string> = {
 };
 
 /** Whether one torque is enough, or the trials ask for more. */
-export function ModelComparison({ result, confidence }: { result: AnalysisResult; confidence: number }) {
+export function ModelComparison({
+  result,
+  confidence,
+}: {
+  result: AnalysisResult;
+  confidence: number;
+}) {
   const { exponent } = result.models.power;
   return (
     <div className="space-y-3">
@@ -22,7 +28,9 @@ export function ModelComparison({ result, confidence }: { result: AnalysisResult
           </li>
         ))}
         {exponent.estimate !== null && (
-          <li>The torque falls with inertia to the power {formatRange(exponent)}; theory says 1.</li>
+          <li>
+            The torque falls with inertia to the power {formatRange(exponent)}; theory says 1.
+          </li>
         )}
       </ul>
       <table className="w-full max-w-3xl text-sm">

@@ -1,5 +1,9 @@
 import { Link } from 'react-router';
-import { type Boundary, type ConfigurationResult, type Interval } from '../../../shared/schemas/analysis.ts';
+import {
+  type Boundary,
+  type ConfigurationResult,
+  type Interval,
+} from '../../../shared/schemas/analysis.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
 import { VerdictWord } from '../../charts/VerdictWord.tsx';
@@ -44,7 +48,9 @@ export function PositionList(props: PositionListProps) {
               value={formatQuantity(one.demonstrated, { rounding: 'down' })}
             />
             <Line
-              name={one.binds === null ? 'working limit' : `working limit, by ${bindWords[one.binds]}`}
+              name={
+                one.binds === null ? 'working limit' : `working limit, by ${bindWords[one.binds]}`
+              }
               value={formatQuantity(one.workingLimit, { rounding: 'down' })}
               strong
             />
@@ -59,7 +65,9 @@ function Line({ name, value, strong = false }: { name: string; value: string; st
   return (
     <span className="flex justify-between gap-3 text-sm">
       <span className="text-muted">{name}</span>
-      <span className={`tabular-nums ${strong ? 'font-bold text-accent' : 'text-ink'}`}>{value}</span>
+      <span className={`tabular-nums ${strong ? 'font-bold text-accent' : 'text-ink'}`}>
+        {value}
+      </span>
     </span>
   );
 }

@@ -7,7 +7,13 @@ import { TextArea } from '../../ui/TextArea.tsx';
 import { useSaveAnalysis } from './boundaryQueries.ts';
 
 /** Keeps what is on the screen, with a word on why. */
-export function SaveAnalysis({ fixtureId, options }: { fixtureId: number; options: AnalysisOptions }) {
+export function SaveAnalysis({
+  fixtureId,
+  options,
+}: {
+  fixtureId: number;
+  options: AnalysisOptions;
+}) {
   const [open, setOpen] = useState(false);
   const [note, setNote] = useState('');
   const save = useSaveAnalysis(fixtureId);

@@ -12,7 +12,9 @@ export function SavedAnalyses({ fixtureId }: { fixtureId: number }) {
   if (saved.isPending) return <Loading />;
   if (saved.isError) return <ErrorState error={saved.error} retry={() => void saved.refetch()} />;
   if (saved.data.items.length === 0) {
-    return <p className="text-muted">None yet. An analyst saves one when a decision rests on it.</p>;
+    return (
+      <p className="text-muted">None yet. An analyst saves one when a decision rests on it.</p>
+    );
   }
   return (
     <DataTable
@@ -22,7 +24,11 @@ export function SavedAnalyses({ fixtureId }: { fixtureId: number }) {
       columns={[
         { key: 'at', title: 'Saved', cell: ({ createdAt }) => formatMinute(createdAt) },
         { key: 'by', title: 'By', cell: ({ createdBy }) => createdBy },
-        { key: 'verdict', title: 'Verdict', cell: ({ verdict }) => <VerdictWord verdict={verdict} /> },
+        {
+          key: 'verdict',
+          title: 'Verdict',
+          cell: ({ verdict }) => <VerdictWord verdict={verdict} />,
+        },
         { key: 'trials', title: 'Trials', numeric: true, cell: ({ trials }) => trials },
         {
           key: 'current',

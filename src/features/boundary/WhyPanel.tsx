@@ -1,4 +1,7 @@
-import { type AnalysisOptions, type ConfigurationResult } from '../../../shared/schemas/analysis.ts';
+import {
+  type AnalysisOptions,
+  type ConfigurationResult,
+} from '../../../shared/schemas/analysis.ts';
 import { checkWords, type CheckWords } from './checkWords.ts';
 
 const tones: Record<CheckWords['tone'], { mark: string; className: string }> = {

@@ -31,8 +31,7 @@ export const everyTrialQuery = (id: number) =>
 export const driveLimitQuery = (id: number) =>
   queryOptions({
     queryKey: ['fixture', id, 'drive limit'],
-    queryFn: async ({ signal }) =>
-      (await api<Fixture>(base(id), { signal })).drive.maxAcceleration,
+    queryFn: async ({ signal }) => (await api<Fixture>(base(id), { signal })).drive.maxAcceleration,
   });
 
 /** What the friction tests say together. */

@@ -18,11 +18,15 @@ function separationWords({ separation }: AnalysisResult): string {
   if (separation.overall === 'complete') {
     return 'All slips lie above all holds: the steepness rests on the penalty, the intervals are wide on purpose.';
   }
-  if (apart.length === 0) return 'Slips and holds overlap in every configuration, as a fit likes it.';
+  if (apart.length === 0)
+    return 'Slips and holds overlap in every configuration, as a fit likes it.';
   return `Slips and holds do not overlap at ${apart.join(', ')}: there the steepness comes from the other configurations.`;
 }
 
-function driftWords({ change, p }: AnalysisResult['diagnostics']['drift'], limit: number): string | null {
+function driftWords(
+  { change, p }: AnalysisResult['diagnostics']['drift'],
+  limit: number,
+): string | null {
   if (change === null || p === null) return null;
   const by = `×${formatQuantity(change, { decimals: 2 })} over the series (p ${writtenP(p)})`;
   return p < limit

@@ -15,12 +15,20 @@ export function OverviewTable({ rows }: { rows: readonly OverviewRow[] }) {
       columns={[
         { key: 'fixture', title: 'Fixture', cell: (row) => <FixtureCell row={row} /> },
         { key: 'line', title: 'Line', cell: ({ line }) => line },
-        { key: 'verdict', title: 'Verdict', cell: ({ verdict }) => <VerdictWord verdict={verdict} /> },
+        {
+          key: 'verdict',
+          title: 'Verdict',
+          cell: ({ verdict }) => <VerdictWord verdict={verdict} />,
+        },
         {
           key: 'position',
           title: 'Tightest',
           cell: ({ fixtureId, tightest }) =>
-            tightest === null ? '–' : <Link to={positionOf(fixtureId, tightest.label)}>{tightest.label}</Link>,
+            tightest === null ? (
+              '–'
+            ) : (
+              <Link to={positionOf(fixtureId, tightest.label)}>{tightest.label}</Link>
+            ),
         },
         {
           key: 'limit',
@@ -65,8 +73,8 @@ export function OverviewCards({ rows }: { rows: readonly OverviewRow[] }) {
               {row.line} · tightest {row.tightest?.label ?? '–'} at{' '}
               {formatQuantity(row.tightest?.limit, { rounding: 'down' })} rad/s² · μ{' '}
               {formatQuantity(row.mu50.estimate, { decimals: 3 })} fitted,{' '}
-              {formatQuantity(row.benchMu, { decimals: 3 })} bench · margin {row.margin} · {rate} parts/h (
-              {change})
+              {formatQuantity(row.benchMu, { decimals: 3 })} bench · margin {row.margin} · {rate}{' '}
+              parts/h ({change})
             </p>
           </li>
         );

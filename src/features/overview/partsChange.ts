@@ -3,8 +3,8 @@ import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 
 /** Parts per hour at the working limit, and what that costs against theory: `1 412`, `−6 %`. */
 export function partsChange({ partsPerHour }: OverviewRow): { rate: string; change: string } {
-  if (partsPerHour?.limit == null) return { rate: '–', change: '–' };
-  const { theory, limit } = partsPerHour;
+  const { theory, limit } = partsPerHour ?? { theory: 0, limit: null };
+  if (limit === null) return { rate: '–', change: '–' };
   const change = (100 * (limit - theory)) / theory;
   return {
     rate: formatQuantity(limit, { decimals: 0 }),

@@ -45,7 +45,11 @@ export function ColumnControls({ answer, given, change }: ColumnControlsProps) {
             {answer.headers.map((header, i) => {
               const meaning = meaningOf(columns, header);
               return (
-                <th key={i} scope="col" className="min-w-36 border-b border-line p-2 text-left align-top">
+                <th
+                  key={i}
+                  scope="col"
+                  className="min-w-36 border-b border-line p-2 text-left align-top"
+                >
                   <span className="block max-w-48 break-words">{header || `column ${i + 1}`}</span>
                   <select
                     aria-label={`Meaning of column ${header || i + 1}`}

@@ -103,21 +103,10 @@ export function FileControls({ answer, given, change }: FileControlsProps) {
             </select>
           </label>
         </div>
-        <label className="flex items-start gap-2 text-sm">
-          <input
-            type="checkbox"
-            className="mt-1"
-            checked={mapping.addConfigurations}
-            onChange={(event) => {
-              change({ ...given, addConfigurations: event.target.checked });
-            }}
-          />
-          <span>Add a configuration for every position on the slide that has none yet</span>
-        </label>
       </div>
     </div>
   );
 }
 
 const selectClass =
-  'rounded border border-control bg-raised px-2 py-1 text-sm font-normal text-ink';
+  'min-h-8 rounded border border-control bg-raised px-2 py-1 text-sm font-normal text-ink';

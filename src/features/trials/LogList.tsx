@@ -63,7 +63,11 @@ export function LogList({ fixtureId }: { fixtureId: number }) {
             key: 'raw',
             title: 'As uploaded',
             cell: ({ id, fileName }) => (
-              <a href={`/api/logs/${id}/raw`} download={fileName} aria-label={`Download ${fileName}`}>
+              <a
+                href={`/api/logs/${id}/raw`}
+                download={fileName}
+                aria-label={`Download ${fileName}`}
+              >
                 Download
               </a>
             ),

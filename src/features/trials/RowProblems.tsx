@@ -1,7 +1,13 @@
 import { type LogProblem } from '../../../shared/schemas/trialLog.ts';
 
 /** Rows with what was found in them and what to do about it. */
-export function RowProblems({ problems, title }: { problems: readonly LogProblem[]; title: string }) {
+export function RowProblems({
+  problems,
+  title,
+}: {
+  problems: readonly LogProblem[];
+  title: string;
+}) {
   return (
     <div className="max-h-96 overflow-auto" tabIndex={0} role="region" aria-label={title}>
       <table className="w-full text-sm">

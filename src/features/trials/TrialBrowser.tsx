@@ -7,7 +7,12 @@ import { Loading } from '../../ui/Loading.tsx';
 import { Pager } from '../../ui/Pager.tsx';
 import { TrialFilters } from './TrialFilters.tsx';
 import { trialPageQuery } from './trialQueries.ts';
-import { changeTrialSearch, readTrialSearch, trialPageSize, trialQueryString } from './trialSearch.ts';
+import {
+  changeTrialSearch,
+  readTrialSearch,
+  trialPageSize,
+  trialQueryString,
+} from './trialSearch.ts';
 import { TrialTable } from './TrialTable.tsx';
 
 /** The trial table with its filters and pages, all of it in the URL. */

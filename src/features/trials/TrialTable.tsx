@@ -22,15 +22,13 @@ export function TrialTable({ trials, sort, setSort, mayExclude }: TrialTableProp
   const [asked, setAsked] = useState<Trial | null>(null);
   const sorted = trialColumns.find((column) => sortState(sort, column.sort) !== 'none');
   const direction = sort.startsWith('-') ? 'descending' : 'ascending';
-  const plain = trialColumns.map(
-    ({ title, unit, sort: by, number, text }): Column<Trial> => ({
-      key: title,
-      title: <SortHead title={title} by={by} sort={sort} setSort={setSort} />,
-      ...(unit === undefined ? {} : { unit }),
-      numeric: number,
-      cell: text,
-    }),
-  );
+  const plain = trialColumns.map(({ title, unit, sort: by, number, text }): Column<Trial> => ({
+    key: title,
+    title: <SortHead title={title} by={by} sort={sort} setSort={setSort} />,
+    ...(unit === undefined ? {} : { unit }),
+    numeric: number,
+    cell: text,
+  }));
   const outcome: Column<Trial> = {
     key: 'Outcome',
     title: <SortHead title="Outcome" by="outcome" sort={sort} setSort={setSort} />,
@@ -54,7 +52,12 @@ export function TrialTable({ trials, sort, setSort, mayExclude }: TrialTableProp
     <>
       <DataTable
         caption="Trials"
-        columns={[...plain.slice(0, 3), outcome, ...plain.slice(3), ...(mayExclude ? [action] : [])]}
+        columns={[
+          ...plain.slice(0, 3),
+          outcome,
+          ...plain.slice(3),
+          ...(mayExclude ? [action] : []),
+        ]}
         rows={trials}
         rowKey={({ id }) => id}
         sorted={{ key: sorted?.title ?? 'Outcome', direction }}

@@ -8,11 +8,6 @@ import type { Trial } from '../../../shared/schemas/trial.ts';
  */
 export function placeInOrder(trials: readonly Trial[]): { trial: Trial; order: number }[] {
   return [...trials]
-    .sort(
-      (a, b) =>
-        a.logId - b.logId ||
-        (a.order ?? a.row) - (b.order ?? b.row) ||
-        a.row - b.row,
-    )
+    .sort((a, b) => a.logId - b.logId || (a.order ?? a.row) - (b.order ?? b.row) || a.row - b.row)
     .map((trial, index) => ({ trial, order: index + 1 }));
 }

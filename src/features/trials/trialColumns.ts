@@ -1,4 +1,4 @@
-import { type Trial, trialSorts } from '../../../shared/schemas/trial.ts';
+import { type Trial, type trialSorts } from '../../../shared/schemas/trial.ts';
 import { fromRadians } from '../../../shared/units/angle.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 
@@ -18,7 +18,12 @@ export interface TrialColumn {
 
 export const trialColumns: readonly TrialColumn[] = [
   { title: 'Row', sort: 'id', number: true, text: ({ row }) => String(row) },
-  { title: 'Configuration', sort: 'configuration', number: false, text: ({ configuration }) => configuration },
+  {
+    title: 'Configuration',
+    sort: 'configuration',
+    number: false,
+    text: ({ configuration }) => configuration,
+  },
   {
     title: 'Acceleration',
     unit: 'rad/s²',
@@ -26,7 +31,12 @@ export const trialColumns: readonly TrialColumn[] = [
     number: true,
     text: ({ acceleration }) => formatQuantity(acceleration, { digits: 4 }),
   },
-  { title: 'Order', sort: 'order', number: true, text: ({ order }) => formatQuantity(order, { digits: 6, decimals: 0 }) },
+  {
+    title: 'Order',
+    sort: 'order',
+    number: true,
+    text: ({ order }) => formatQuantity(order, { digits: 6, decimals: 0 }),
+  },
   {
     title: 'Slip',
     unit: '°',
@@ -46,7 +56,10 @@ export function nextSort(current: Sort, column: SortKey): Sort {
 }
 
 /** `aria-sort` of a column under the present sort. */
-export function sortState(current: Sort, column: TrialColumn['sort']): 'ascending' | 'descending' | 'none' {
+export function sortState(
+  current: Sort,
+  column: TrialColumn['sort'],
+): 'ascending' | 'descending' | 'none' {
   if (current === column) return 'ascending';
   return current === `-${column ?? ''}` ? 'descending' : 'none';
 }

@@ -33,7 +33,9 @@ export const labelsQuery = (id: number) =>
   queryOptions({
     queryKey: ['fixture', id, 'labels'],
     queryFn: async ({ signal }) => {
-      const { items } = await api<{ items: Configuration[] }>(`${base(id)}/configurations`, { signal });
+      const { items } = await api<{ items: Configuration[] }>(`${base(id)}/configurations`, {
+        signal,
+      });
       return items.map(({ label }) => label);
     },
   });

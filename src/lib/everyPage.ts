@@ -9,6 +9,8 @@ export async function everyPage<T>(path: string, signal: AbortSignal): Promise<T
     api<Page<T>>(`${path}?page=${page}&pageSize=${largestPage}`, { signal });
   const first = await get(1);
   const pages = Math.ceil(first.total / largestPage);
-  const rest = await Promise.all(Array.from({ length: Math.max(pages - 1, 0) }, (_, i) => get(i + 2)));
+  const rest = await Promise.all(
+    Array.from({ length: Math.max(pages - 1, 0) }, (_, i) => get(i + 2)),
+  );
   return [first, ...rest].flatMap(({ items }) => items);
 }

@@ -11,10 +11,13 @@ export interface EndSearch {
   from: number;
   direction: 1 | -1;
   crit: number;
-  /** A first step: about one standard error. */
+  /** Where the end is expected, as a distance from the start: √crit standard errors. */
   scale: number;
-  /** The range in which trials lie: steps stay short there, so that no bump is stepped over. */
-  range: readonly [number, number];
+  /**
+   * The range in which trials lie, if the profile can be bumpy there: steps stay short, so that no
+   * bump is stepped over. Null for a smooth one.
+   */
+  bumpy: readonly [number, number] | null;
 }
 
 /** ln of the largest acceleration or torque that a double holds, with room to spare. */
@@ -51,26 +54,25 @@ export function findEnd(profiles: readonly Profile[], search: EndSearch): number
 
 /** Follows one profile outwards to where it crosses `crit`. */
 function follow(profile: Profile, search: EndSearch): number | null {
-  const { direction, crit, range } = search;
+  const { direction, crit, bumpy } = search;
   const root = Math.sqrt(crit);
   let inside = search.from;
   let at = profile.at(inside);
   let outside: number | null = null;
   let step = search.scale;
-  const longest = Math.max((range[1] - range[0]) / 16, search.scale / 4);
+  const longest = bumpy ? (bumpy[1] - bumpy[0]) / 16 : Infinity;
   while (outside === null) {
     // √D is nearly straight: its tangent says how far the crossing is
     const r = Math.sqrt(Math.max(at.deviance, 0));
     const rate = (direction * at.slope) / (2 * r);
     const expected = r > 0.05 * root && rate > 0 ? ((root - r) / rate) * 1.02 + 1e-9 : step * 2;
     step = Math.min(Math.max(expected, step / 8), step * 3);
-    const near = inside > range[0] - longest && inside < range[1] + longest;
-    if (near) step = Math.min(step, longest);
-    else {
+    if (bumpy) {
+      const within = inside > bumpy[0] - longest && inside < bumpy[1] + longest;
       // from outside the range, halt where it begins
-      const entry = direction > 0 ? range[0] : range[1];
-      const ahead = direction * (entry - inside);
-      if (ahead > 0) step = Math.min(step, ahead);
+      const ahead = direction * (bumpy[direction > 0 ? 0 : 1] - inside);
+      if (within) step = Math.min(step, longest);
+      else if (ahead > 0) step = Math.min(step, ahead);
     }
     const next = inside + direction * step;
     if (Math.abs(next) > LN_MAX) return null;

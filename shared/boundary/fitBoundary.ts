@@ -229,7 +229,7 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
           if (count > 1) {
             const own = same
               ? search.own[c]!
-              : fitCommonSlope(cells, withShifts(count, [...found, c]), other);
+              : fitCommonSlope(cells, withShifts(count, [...found, c]), other, commonFit);
             bounds.push(bound(own, found.length + 1, checkBasis, true));
           }
         }

@@ -1,5 +1,5 @@
 import { cholesky, invertCholesky, solveCholesky } from '../numeric/cholesky.ts';
-import type { LinkFunction } from './link.ts';
+import { createCellTerms, type LinkFunction } from './link.ts';
 
 /** A binomial regression on any columns. */
 export interface LinearProblem {
@@ -73,79 +73,88 @@ interface State {
 function evaluate(problem: LinearProblem, beta: Float64Array, penalised: boolean): State {
   const { columns: p, design, n, k, link } = problem;
   const rows = n.length;
-  const out = new Float64Array(7);
-  const information = new Float64Array(p * p);
-  const curvature = new Float64Array(p * p);
-  const gradient = new Float64Array(p);
-  const weight1 = new Float64Array(rows);
-  const weight2 = new Float64Array(rows);
-  let logLik = 0;
-  for (let i = 0; i < rows; i++) {
-    let eta = 0;
-    for (let j = 0; j < p; j++) eta += design[i * p + j] * beta[j];
-    link.at(eta, out);
-    const slips = k[i];
-    const holds = n[i] - slips;
-    if (slips > 0) logLik += slips * out[0];
-    if (holds > 0) logLik += holds * out[1];
-    const [r1, r0, g1, g0] = [out[2], out[3], out[4], out[5]];
-    const w = n[i] * r1 * r0;
-    const u = g1 + g0;
-    weight1[i] = w * u;
-    weight2[i] = w * (u * u + out[6]);
-    addOuter(information, design, i, p, w);
-    addOuter(curvature, design, i, p, holds * r0 * g0 - slips * r1 * g1);
-    const score = slips * r1 - holds * r0;
-    for (let j = 0; j < p; j++) gradient[j] += score * design[i * p + j];
+  const eta = new Float64Array(rows);
+  for (let i = 0, at = 0; i < rows; i++) {
+    let sum = 0;
+    for (let j = 0; j < p; j++, at++) sum += design[at] * beta[j];
+    eta[i] = sum;
   }
+  const terms = createCellTerms(rows);
+  const logLik = link.terms(eta, n, k, terms);
+  const gradient = new Float64Array(p);
+  addRows(gradient, design, terms.score, p);
+  const information = new Float64Array(p * p);
+  addOuter(information, design, terms.w, p);
+  const curvature = new Float64Array(p * p);
+  addOuter(curvature, design, terms.curve, p);
   const factor = cholesky(information, p);
   const logDet = factor ? factor.logDet : -Infinity;
   const state = { logLik, value: logLik, gradient, curvature, information, logDet };
   if (!penalised) return state;
   state.value += 0.5 * logDet;
   if (!factor) return state;
+  // ∂ ½ ln det I = ½ Σ h w′, with h the leverage of a row per unit of its weight
   const inverse = invertCholesky(factor);
-  const exact = p <= EXACT_COLUMNS;
-  const byColumn = exact ? Array.from({ length: p }, () => new Float64Array(p * p)) : [];
-  for (let i = 0; i < rows; i++) {
-    const leverage = quadratic(inverse, design, i, p);
-    const pull = 0.5 * leverage * weight1[i];
-    for (let j = 0; j < p; j++) gradient[j] += pull * design[i * p + j];
-    if (exact) {
-      addOuter(curvature, design, i, p, -0.5 * leverage * weight2[i]);
-      byColumn.forEach((m, j) => addOuter(m, design, i, p, weight1[i] * design[i * p + j]));
-    }
-  }
-  if (exact) {
-    const turned = byColumn.map((m) => multiply(inverse, m, p));
-    for (let j = 0; j < p; j++) {
-      for (let l = 0; l <= j; l++) {
-        const half = 0.5 * traceOfProduct(turned[j], turned[l], p);
-        curvature[j * p + l] += half;
-        if (l !== j) curvature[l * p + j] += half;
-      }
-    }
-  } else {
+  const pull = leverages(inverse, design, rows, p);
+  const bend = Float64Array.from(pull, (h, i) => -0.5 * h * terms.w2[i]);
+  for (let i = 0; i < rows; i++) pull[i] *= 0.5 * terms.w1[i];
+  addRows(gradient, design, pull, p);
+  if (p > EXACT_COLUMNS) {
     curvature.set(information);
+    return state;
+  }
+  addOuter(curvature, design, bend, p);
+  const turned: Float64Array[] = [];
+  const weight = new Float64Array(rows);
+  for (let j = 0; j < p; j++) {
+    for (let i = 0; i < rows; i++) weight[i] = terms.w1[i] * design[i * p + j];
+    const derivative = new Float64Array(p * p);
+    addOuter(derivative, design, weight, p);
+    turned.push(multiply(inverse, derivative, p));
+  }
+  for (let j = 0; j < p; j++) {
+    for (let l = 0; l <= j; l++) {
+      const half = 0.5 * traceOfProduct(turned[j], turned[l], p);
+      curvature[j * p + l] += half;
+      if (l !== j) curvature[l * p + j] += half;
+    }
   }
   return state;
 }
 
-function addOuter(into: Float64Array, design: Float64Array, row: number, p: number, w: number) {
-  for (let j = 0; j < p; j++) {
-    const x = w * design[row * p + j];
-    if (x === 0) continue;
-    for (let l = 0; l < p; l++) into[j * p + l] += x * design[row * p + l];
+/** Σ w_i x_i. */
+function addRows(into: Float64Array, design: Float64Array, w: Float64Array, p: number): void {
+  for (let i = 0, at = 0; i < w.length; i++) {
+    for (let j = 0; j < p; j++, at++) into[j] += w[i] * design[at];
   }
 }
 
-function quadratic(matrix: Float64Array, design: Float64Array, row: number, p: number): number {
-  let sum = 0;
-  for (let j = 0; j < p; j++) {
-    const x = design[row * p + j];
-    for (let l = 0; l < p; l++) sum += x * matrix[j * p + l] * design[row * p + l];
+/** Σ w_i x_i x_iᵀ. */
+function addOuter(into: Float64Array, design: Float64Array, w: Float64Array, p: number): void {
+  for (let i = 0, at = 0; i < w.length; i++, at += p) {
+    for (let j = 0; j < p; j++) {
+      const x = w[i] * design[at + j];
+      if (x === 0) continue;
+      for (let l = 0; l <= j; l++) into[j * p + l] += x * design[at + l];
+    }
   }
-  return sum;
+  for (let j = 0; j < p; j++) for (let l = 0; l < j; l++) into[l * p + j] = into[j * p + l];
+}
+
+/** x_iᵀ A x_i of every row. */
+function leverages(a: Float64Array, design: Float64Array, rows: number, p: number): Float64Array {
+  const result = new Float64Array(rows);
+  for (let i = 0, at = 0; i < rows; i++, at += p) {
+    let sum = 0;
+    for (let j = 0; j < p; j++) {
+      const x = design[at + j];
+      let row = 0.5 * a[j * p + j] * x;
+      for (let l = 0; l < j; l++) row += a[j * p + l] * design[at + l];
+      sum += 2 * x * row;
+    }
+    result[i] = sum;
+  }
+  return result;
 }
 
 function multiply(a: Float64Array, b: Float64Array, p: number): Float64Array {

@@ -64,8 +64,8 @@ export function coefficientInterval(
   });
   const se = Math.sqrt(fit.covariance![index * columns + index]);
   const estimate = fit.beta[index];
-  const range = [estimate - 8 * se, estimate + 8 * se] as const;
-  const search = { from: estimate, crit, scale: se, range };
+  const bumpy = [estimate - 8 * se, estimate + 8 * se] as const;
+  const search = { from: estimate, crit, scale: Math.sqrt(crit) * se, bumpy };
   return {
     lower: findEnd([profile], { ...search, direction: -1 }),
     upper: findEnd([profile], { ...search, direction: 1 }),

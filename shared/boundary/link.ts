@@ -80,6 +80,8 @@ const logit: LinkFunction = {
   // written out, because nearly all of an analysis is spent here
   terms(eta, n, k, { score, curve, w, w1, w2 }) {
     let logLik = 0;
+    // Σ n ln(1 + e) as the logarithm of a product, taken before it can overflow
+    let product = 1;
     for (let i = 0; i < n.length; i++) {
       const x = eta[i];
       const trials = n[i];
@@ -92,7 +94,12 @@ const logit: LinkFunction = {
       const q = x > 0 ? small : large;
       const pq = large * small;
       logLik += x > 0 ? (slips - trials) * x : slips * x;
-      logLik -= trials * Math.log(sum);
+      if (trials === 1) product *= sum;
+      else logLik -= trials * Math.log(sum);
+      if (product > 1e200) {
+        logLik -= Math.log(product);
+        product = 1;
+      }
       score[i] = slips * q - (trials - slips) * p;
       const weight = trials * pq;
       const u = q - p;
@@ -101,7 +108,7 @@ const logit: LinkFunction = {
       w1[i] = weight * u;
       w2[i] = weight * (u * u - 2 * pq);
     }
-    return logLik;
+    return logLik - Math.log(product);
   },
 };
 
@@ -161,7 +168,28 @@ const cloglog: LinkFunction = {
   name: 'cloglog',
   eta: (p) => Math.log(-Math.log1p(-p)),
   at: cloglogAt,
-  terms: termsBy(cloglogAt),
+  terms(eta, n, k, { score, curve, w, w1, w2 }) {
+    let logLik = 0;
+    for (let i = 0; i < n.length; i++) {
+      const e = Math.exp(eta[i]);
+      const hazard = e < 700 ? e : 700;
+      const grown = Math.expm1(hazard);
+      const slips = k[i];
+      const holds = n[i] - slips;
+      const r1 = hazard === 0 ? 1 : hazard / grown;
+      const g1 = 1 - hazard - r1;
+      if (slips > 0) logLik += slips * (hazard < 1e-300 ? eta[i] : Math.log(grown) - hazard);
+      if (holds > 0) logLik -= holds * e;
+      score[i] = slips * r1 - holds * hazard;
+      curve[i] = holds * hazard - slips * r1 * g1;
+      const weight = n[i] * r1 * hazard;
+      const u = g1 + 1;
+      w[i] = weight;
+      w1[i] = weight * u;
+      w2[i] = weight * (u * u - hazard - r1 * g1);
+    }
+    return logLik;
+  },
 };
 
 const byName = { logit, probit, cloglog };

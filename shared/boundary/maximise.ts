@@ -1,3 +1,4 @@
+import { cholesky, solveCholesky } from '../numeric/cholesky.ts';
 import { createArrow, solveArrow, type Arrow } from './arrow.ts';
 import type { CommonSlope, Penalty } from './commonSlope.ts';
 import type { Constraint } from './constraint.ts';
@@ -82,6 +83,29 @@ function projectVector(c: Constraint, onA: Float64Array, onB: number, into: Floa
   }
 }
 
+/** Up to this many free parameters a full factorisation is worth its cost. */
+const DENSE = 40;
+
+/** Solves (A + ½ v vᵀ) x = rhs by a full Cholesky factor; false if not positive definite. */
+function solveDense(arrow: Arrow, v: Float64Array, rhs: Float64Array, x: Float64Array): boolean {
+  const size = rhs.length;
+  const { reps, globals, diagonal, border, core } = arrow;
+  const matrix = new Float64Array(size * size);
+  for (let r = 0; r < reps; r++) matrix[r * size + r] = diagonal[r];
+  for (let e = 0; e < globals; e++) {
+    const row = (reps + e) * size;
+    for (let r = 0; r < reps; r++) matrix[row + r] = border[e * reps + r];
+    for (let f = 0; f <= e; f++) matrix[row + reps + f] = e === f ? core[3 * e] : core[1];
+  }
+  for (let i = 0; i < size; i++) {
+    for (let j = 0; j <= i; j++) matrix[i * size + j] += 0.5 * v[i] * v[j];
+  }
+  const factor = cholesky(matrix, size);
+  if (!factor) return false;
+  x.set(solveCholesky(factor, rhs));
+  return true;
+}
+
 function dot(x: Float64Array, y: Float64Array): number {
   let sum = 0;
   for (let i = 0; i < x.length; i++) sum += x[i] * y[i];
@@ -140,13 +164,16 @@ export function maximise(
   for (let iteration = 1; iteration <= limit; iteration++) {
     projectVector(constraint, model.gradA, model.gradB, gradient);
     projectMatrix(constraint, model.hessAA, model.hessAB, model.hessBB, arrow);
+    projectVector(constraint, model.rankA, model.rankB, rank);
     let positive = solveArrow(arrow, gradient, step);
     if (positive && penalty === 'common') {
       // the rank-one part of the penalty's curvature, by Sherman & Morrison
-      projectVector(constraint, model.rankA, model.rankB, rank);
       positive = solveArrow(arrow, rank, solved);
       const factor = (0.5 * dot(rank, step)) / (1 + 0.5 * dot(rank, solved));
       for (let i = 0; i < dimension; i++) step[i] -= factor * solved[i];
+    } else if (penalty === 'common' && dimension <= DENSE) {
+      // the whole can be positive definite although the arrow without its rank-one part is not
+      positive = solveDense(arrow, rank, gradient, step);
     }
     let decrement = dot(gradient, step);
     if (!positive || !(decrement >= 0)) {

@@ -36,7 +36,7 @@ export function fitModels(data: BoundaryData, link: LinkFunction, penalised: boo
   const scaled = fitCommonSlope(cells, together(count), link);
   return {
     scaled,
-    offsets: count === 1 ? scaled : fitCommonSlope(cells, apart(count), link),
+    offsets: count === 1 ? scaled : fitCommonSlope(cells, apart(count), link, scaled),
     separate: Array.from({ length: count }, (_, c) => {
       const own = cellsOf(cells, c);
       return own.size > 1 ? fitCommonSlope(own, together(1), link) : null;

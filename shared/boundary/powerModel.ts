@@ -1,5 +1,6 @@
 import type { BoundaryData } from './collect.ts';
 import { findEnd } from './findEnd.ts';
+import { CLEAR_SLOPE } from './fitCommonSlope.ts';
 import {
   fitLinear,
   withCoefficient,
@@ -89,19 +90,22 @@ export function exponentInterval(
   const b = fit.beta[1];
   if (!(b > NO_SLOPE)) return { ...none, absence: 'falling' };
   const estimate = 1 + fit.beta[2] / b;
+  const clear = b / Math.sqrt(fit.covariance![4]) > CLEAR_SLOPE;
   const profile = linearProfile(problem, fit, penalised, {
     constraintAt: exponentAt,
-    starts: [1, -1, 0.2, 3].map((factor) => Float64Array.from([fit.beta[0], factor * b])),
+    starts: (clear ? [1] : [1, -1, 0.2, 3]).map((factor) =>
+      Float64Array.from([fit.beta[0], factor * b]),
+    ),
     slopeOf: (there) => there.beta[1] * there.gradient[2],
   });
   const level = fitLinear(problem, penalised, withCoefficient(COLUMNS, 1, 0));
-  const se = Math.sqrt(Math.max(1e-12, fit.covariance![8])) / b;
-  const search = {
-    from: estimate,
-    crit,
-    scale: se,
-    range: [estimate - 4 * se, estimate + 4 * se] as const,
-  };
+  // first-order variance of (b + c)/b
+  const [bb, bc, cc] = [fit.covariance![4], fit.covariance![5], fit.covariance![8]];
+  const ratio = estimate - 1;
+  const variance = (cc - 2 * ratio * bc + ratio * ratio * bb) / (b * b);
+  const scale = Math.sqrt(crit * Math.max(variance, 1e-12));
+  const bumpy = clear ? null : ([estimate - 4 * scale, estimate + 4 * scale] as const);
+  const search = { from: estimate, crit, scale, bumpy };
   const absent = 2 * (fit.value - level.value) <= crit;
   return {
     estimate: absent ? null : estimate,

@@ -1,6 +1,6 @@
 import { quantileAt, shiftedBy } from './constraint.ts';
 import { findEnd, type Profile } from './findEnd.ts';
-import type { CommonSlopeFit } from './fitCommonSlope.ts';
+import type { CommonSlopeFit, Information } from './fitCommonSlope.ts';
 import { addToOrder, emptyOrder } from './order.ts';
 import { penalisedProfile, plainProfile, type Quantity } from './profiles.ts';
 
@@ -40,8 +40,8 @@ function outcomesOf(fit: CommonSlopeFit, group: number): { slips: boolean; holds
 
 /** Deviance of slope 0, the value every profile tends to. */
 export function flatDeviance(fit: CommonSlopeFit, basis: Basis): number {
-  const penalised = 2 * (fit.penalised.value - fit.flat.penalised);
-  const plain = 2 * (fit.supremum.logLik - fit.flat.logLik);
+  const penalised = 2 * (fit.penalised.value - fit.flat().penalised);
+  const plain = 2 * (fit.supremum.logLik - fit.flat().logLik);
   return basis === 'penalised' ? penalised : basis === 'plain' ? plain : Math.min(penalised, plain);
 }
 
@@ -54,8 +54,21 @@ interface Ask {
   crit: number;
   /** A difference of two z rather than a z. */
   difference: boolean;
+  /** First-order variance of the quantity at its estimate. */
+  varianceOf: (information: Information, estimate: number, slope: number) => number;
   /** Ends that do not exist whatever the likelihood says, and why there is no estimate. */
   open: { lower: boolean; upper: boolean; absence: Absence | null };
+}
+
+function total(values: Float64Array): number {
+  return values.reduce((sum, value) => sum + value, 0);
+}
+
+/** Where trials lie: lowest and highest z, or the same for differences of z. */
+function rangeOf(z: Float64Array, difference: boolean): readonly [number, number] {
+  const low = z.reduce((least, value) => Math.min(least, value), Infinity);
+  const high = z.reduce((most, value) => Math.max(most, value), -Infinity);
+  return difference ? [low - high, high - low] : [low, high];
 }
 
 function intervalOf(ask: Ask): ProfileInterval {
@@ -69,17 +82,12 @@ function intervalOf(ask: Ask): ProfileInterval {
   const profiles: Profile[] = [];
   if (basis !== 'plain') profiles.push(penalisedProfile(fit, ask.quantity));
   if (basis !== 'penalised') profiles.push(plainProfile(fit, ask.quantity));
-  const { z } = model.cells;
-  let low = Infinity;
-  let high = -Infinity;
-  for (const value of z) {
-    low = Math.min(low, value);
-    high = Math.max(high, value);
-  }
-  const weight = Math.max(fit.information.weight[ask.quantity.group], 1e-12);
-  const scale = Math.min(1 / (b * Math.sqrt(weight)), high - low);
-  const range = ask.difference ? ([low - high, high - low] as const) : ([low, high] as const);
-  const search = { from, crit, scale, range };
+  const search = {
+    from,
+    crit,
+    scale: Math.sqrt(crit * Math.max(ask.varianceOf(fit.information, from, b), 1e-30)),
+    bumpy: model.careful ? rangeOf(model.cells.z, ask.difference) : null,
+  };
   const absence = open.absence ?? (flatDeviance(fit, basis) <= crit ? 'flat' : null);
   return {
     estimate: absence === null ? from : null,
@@ -115,6 +123,8 @@ export function quantileInterval(
     },
     estimateOf: (a, b) => (eta - a[group]) / b,
     difference: false,
+    varianceOf: ({ weight, mean, spread }, x, b) =>
+      (1 / weight[group] + (x - mean[group]) ** 2 / total(spread)) / (b * b),
     basis,
     crit,
     open: {
@@ -142,6 +152,9 @@ export function shiftInterval(
     },
     estimateOf: (a, b) => (a[0] - a[group]) / b,
     difference: true,
+    varianceOf: ({ weight, mean, spread }, delta, b) =>
+      (1 / weight[0] + 1 / weight[group] + (mean[group] - mean[0] - delta) ** 2 / total(spread)) /
+      (b * b),
     basis,
     crit,
     open: {

@@ -11,7 +11,11 @@ export interface Quantity {
   constraintAt: (x: number) => Constraint;
 }
 
-const TOLERANCE = 1e-13;
+/**
+ * Newton decrement at which a profile point is done: the last step's gain is added to the value,
+ * whose error is then of the order of the decrement to the power 3/2.
+ */
+const TOLERANCE = 1e-10;
 
 /**
  * Profile penalised likelihood of a quantity; the penalty always uses the full model's information.
@@ -21,6 +25,7 @@ const TOLERANCE = 1e-13;
 export function penalisedProfile(fit: CommonSlopeFit, quantity: Quantity): Profile {
   const { model, penalised } = fit;
   let warm: Float64Array | null = null;
+  let last = { x: NaN, deviance: NaN };
   const deviance = (maximum: Maximum) => Math.max(0, 2 * (penalised.value - maximum.value));
   const first = (constraint: Constraint) => {
     const start = new Float64Array(constraint.reps + 1);
@@ -37,9 +42,11 @@ export function penalisedProfile(fit: CommonSlopeFit, quantity: Quantity): Profi
         tolerance: TOLERANCE,
       });
       if (there.status === 'converged') warm = there.free;
-      return { deviance: deviance(there), slope: 2 * there.b * there.gradA[quantity.group] };
+      last = { x, deviance: deviance(there) };
+      return { deviance: last.deviance, slope: 2 * there.b * there.gradA[quantity.group] };
     },
     surely(x) {
+      if (!model.careful && x === last.x) return last.deviance;
       const constraint = quantity.constraintAt(x);
       const there = bestMaximum(model, constraint, 'common', warm ?? first(constraint), {
         tolerance: TOLERANCE,

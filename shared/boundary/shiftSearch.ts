@@ -63,7 +63,7 @@ export function shiftSearch(
     const remaining = labels.map((_, c) => c).filter((c) => !found.includes(c));
     const own: (CommonSlopeFit | null)[] = labels.map(() => null);
     for (const c of remaining) {
-      const fit = fitCommonSlope(cells, withShifts(count, [...found, c]), link);
+      const fit = fitCommonSlope(cells, withShifts(count, [...found, c]), link, common);
       own[c] = fit;
       const deviance = shiftDeviance(fit, found.length + 1, basis) / factor;
       p[c] = Number.isFinite(deviance) ? chiSquareUpper(deviance, 1) : null;

@@ -70,8 +70,9 @@ export function fittedCurves(scene: MapScene, frame: MapFrame, theme: ChartTheme
  */
 export function limitCurves(scene: MapScene, frame: MapFrame, theme: ChartTheme): Data[] {
   const data: Data[] = [];
-  const first = frame.columns[0];
-  const last = frame.columns.at(-1);
+  const tested = frame.columns.filter(({ workingLimit }) => workingLimit !== null);
+  const first = tested[0];
+  const last = tested.at(-1);
   if (scene.limitTorque !== null && first !== undefined && last !== undefined) {
     const xs = alongX({ ...frame, x: [first.x, last.x] });
     const curve = torqueCurve(scene, xs, scene.limitTorque);

@@ -11,9 +11,10 @@ export function refusedRowsCsv(problems: readonly LogProblem[]): string {
   return `\uFEFF${['row,column,value,reason', ...lines].join('\r\n')}\r\n`;
 }
 
-const formulaStart = /^[\u0000\t\r=+\-@\uFF1D\uFF0B\uFF0D\uFF20]/;
+/** What makes a spreadsheet read a text as a formula, their full-width forms included. */
+const formulaStarts = [...'=+-@\t\r\0\uFF1D\uFF0B\uFF0D\uFF20'];
 
 function text(value: string): string {
-  const safe = formulaStart.test(value) ? `'${value}` : value;
+  const safe = formulaStarts.includes(value.charAt(0)) ? `'${value}` : value;
   return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
 }

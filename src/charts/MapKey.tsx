@@ -15,14 +15,28 @@ const lines = {
     className: 'text-ink',
     width: 2,
   },
-  limit: { title: 'working limit', dash: undefined, className: 'text-accent', width: 3 },
+  limit: {
+    title: 'working limit: line between positions, bar at one',
+    dash: undefined,
+    className: 'text-accent',
+    width: 3,
+  },
   drive: { title: 'drive limit', dash: '2 3', className: 'text-muted', width: 1.5 },
 } as const;
 
 export type KeyLine = keyof typeof lines;
 
 /** What the marks and lines of a map mean; only those that are in it. */
-export function MapKey({ drawn, excluded }: { drawn: readonly KeyLine[]; excluded: boolean }) {
+export function MapKey({
+  drawn,
+  excluded,
+  fits = [],
+}: {
+  drawn: readonly KeyLine[];
+  excluded: boolean;
+  /** marks of the configurations' own fits that are in the picture */
+  fits?: readonly ('fitted' | 'set apart')[];
+}) {
   return (
     <ul
       aria-label="Key to the picture"
@@ -40,6 +54,16 @@ export function MapKey({ drawn, excluded }: { drawn: readonly KeyLine[]; exclude
       {excluded && (
         <li>
           <MarkGlyph shape="circle-open-dot" /> excluded, with a dot
+        </li>
+      )}
+      {fits.includes('fitted') && (
+        <li>
+          <MarkGlyph shape="square" className="text-ink" /> half slip at one position, own fit
+        </li>
+      )}
+      {fits.includes('set apart') && (
+        <li>
+          <MarkGlyph shape="star" className="text-ink" /> the same, set apart from the common curve
         </li>
       )}
       {drawn.map((name) => (

@@ -8,6 +8,8 @@ const paths: Record<MarkShape, string> = {
   diamond: 'M8 2l6 6l-6 6l-6-6z',
   'diamond-open': 'M8 2l6 6l-6 6l-6-6z',
   'diamond-open-dot': 'M8 2l6 6l-6 6l-6-6zM8 7.2a.8.8 0 1 0 0 1.6a.8.8 0 1 0 0-1.6z',
+  square: 'M4 4h8v8h-8z',
+  star: 'M8 1.5l1.7 4.6l4.9.2l-3.8 3.1l1.3 4.7l-4.1-2.7l-4.1 2.7l1.3-4.7l-3.8-3.1l4.9-.2z',
   'square-open': 'M3 3h10v10h-10z',
   'triangle-down': 'M2 3.5h12l-6 10z',
   'triangle-down-open': 'M2 3.5h12l-6 10z',
@@ -19,6 +21,8 @@ const paths: Record<MarkShape, string> = {
 };
 
 const filled: ReadonlySet<MarkShape> = new Set([
+  'square',
+  'star',
   'circle',
   'diamond',
   'triangle-down',

@@ -104,7 +104,14 @@ function marks(points: readonly ParityPoint[], verdict: Verdict, theme: ChartThe
         `fitted ${formatRange(fitted)} rad/s²`,
     ),
     hoverinfo: 'text',
-    marker: { symbol, size: 11, color: color(theme), line: { color: color(theme), width: 2 } },
+    marker: {
+      symbol,
+      size: 10,
+      color: color(theme),
+      line: symbol.includes('open')
+        ? { color: color(theme), width: 2 }
+        : { color: theme.paper, width: 0.75 },
+    },
     showlegend: false,
   };
 }

@@ -30,15 +30,6 @@ export function BoundaryBelow({
           <NumbersTable configurations={result.configurations} target={options.target} />
         </div>
       </Panel>
-      {result.notes.length > 0 && (
-        <Panel title="Notes and cautions">
-          <ul className="max-w-prose list-disc space-y-1 pl-5">
-            {result.notes.map((note) => (
-              <li key={note}>{note}</li>
-            ))}
-          </ul>
-        </Panel>
-      )}
       <Disclosure title="How the models compare">
         <ModelComparison result={result} confidence={options.confidence} />
       </Disclosure>

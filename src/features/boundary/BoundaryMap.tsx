@@ -1,13 +1,14 @@
 import { useCallback, useMemo } from 'react';
-import type { Boundary } from '../../../shared/schemas/analysis.ts';
+import type { AnalysisResult, Boundary } from '../../../shared/schemas/analysis.ts';
 import type { Trial } from '../../../shared/schemas/trial.ts';
 import { drawBoundaryMap } from '../../charts/boundaryMap/drawBoundaryMap.ts';
 import type { ChartTheme } from '../../charts/chartTheme.ts';
 import { type KeyLine, MapKey } from '../../charts/MapKey.tsx';
 import { Plot } from '../../charts/Plot.tsx';
+import { Panel } from '../../ui/Panel.tsx';
 import { Segments } from '../../ui/Segments.tsx';
 import { mapAlternative } from './mapAlternative.ts';
-import { mapSceneOf } from './mapSceneOf.ts';
+import { isSetApart, mapSceneOf } from './mapSceneOf.ts';
 import { MapTable } from './MapTable.tsx';
 import type { MapViewState } from './useMapView.ts';
 
@@ -37,27 +38,31 @@ export function BoundaryMap(props: BoundaryMapProps) {
   const { result } = boundary;
   if (scene === null || result === null) return null;
   return (
-    <div>
-      <div className="mb-2 flex flex-wrap justify-end gap-2">
-        <Segments
-          label="Acceleration against"
-          value={scene.view}
-          options={[
-            { value: 'inertia', text: 'inertia' },
-            { value: 'position', text: 'position' },
-          ]}
-          onChange={(next) => state.change({ view: next })}
-        />
-        <Segments
-          label="Scale"
-          value={scale}
-          options={[
-            { value: 'log', text: 'log' },
-            { value: 'linear', text: 'linear' },
-          ]}
-          onChange={(next) => state.change({ scale: next })}
-        />
-      </div>
+    <Panel
+      title="Map"
+      actions={
+        <div className="flex flex-wrap gap-2">
+          <Segments
+            label="Acceleration against"
+            value={scene.view}
+            options={[
+              { value: 'inertia', text: 'inertia' },
+              { value: 'position', text: 'position' },
+            ]}
+            onChange={(next) => state.change({ view: next })}
+          />
+          <Segments
+            label="Scale"
+            value={scale}
+            options={[
+              { value: 'log', text: 'log' },
+              { value: 'linear', text: 'linear' },
+            ]}
+            onChange={(next) => state.change({ scale: next })}
+          />
+        </div>
+      }
+    >
       <Plot
         draw={draw}
         alternative={mapAlternative(result, scene.view)}
@@ -66,13 +71,14 @@ export function BoundaryMap(props: BoundaryMapProps) {
           <MapKey
             drawn={keyLines(boundary, driveLimit)}
             excluded={trials.some((one) => one.excluded)}
+            fits={fitMarks(result)}
           />
         }
         tableTitle="The picture as a table"
         table={<MapTable configurations={result.configurations} trials={trials} />}
         onChoose={onChoose}
       />
-    </div>
+    </Panel>
   );
 }
 
@@ -87,4 +93,12 @@ function keyLines({ result }: Boundary, driveLimit: number | null): KeyLine[] {
   if (result.configurations.some(({ workingLimit }) => workingLimit !== null)) lines.push('limit');
   if (driveLimit !== null) lines.push('drive');
   return lines;
+}
+
+function fitMarks({ configurations }: AnalysisResult): ('fitted' | 'set apart')[] {
+  const fitted = configurations.filter(({ alpha50 }) => alpha50.offsets.estimate !== null);
+  const marks: ('fitted' | 'set apart')[] = [];
+  if (fitted.some((one) => !isSetApart(one))) marks.push('fitted');
+  if (fitted.some(isSetApart)) marks.push('set apart');
+  return marks;
 }

@@ -2,14 +2,15 @@ import { useState } from 'react';
 import { Link } from 'react-router';
 import type { AnalysisResult, Boundary } from '../../../shared/schemas/analysis.ts';
 import type { Trial } from '../../../shared/schemas/trial.ts';
+import { VerdictWord } from '../../charts/VerdictWord.tsx';
 import { useMay } from '../../lib/session.ts';
 import { Notice } from '../../ui/Notice.tsx';
 import { PageHeader } from '../../ui/PageHeader.tsx';
-import { Panel } from '../../ui/Panel.tsx';
 import { BoundaryBelow } from './BoundaryBelow.tsx';
 import { BoundaryMap } from './BoundaryMap.tsx';
 import { ColumnTrials } from './ColumnTrials.tsx';
 import { trialMark } from './mapSceneOf.ts';
+import { Notes } from './Notes.tsx';
 import { PositionList } from './PositionList.tsx';
 import { SaveAnalysis } from './SaveAnalysis.tsx';
 import { useMapView } from './useMapView.ts';
@@ -63,18 +64,16 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
           )}
         </div>
       )}
-      <div className="mb-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_24rem]">
-        <Panel title="Map">
-          <BoundaryMap
-            boundary={boundary}
-            trials={trials}
-            driveLimit={driveLimit}
-            chosen={chosen?.label ?? null}
-            state={state}
-            onChoose={choose}
-          />
-        </Panel>
-        <div className="space-y-4">
+      <div className="mb-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_24rem] lg:grid-rows-[auto_1fr]">
+        <BoundaryMap
+          boundary={boundary}
+          trials={trials}
+          driveLimit={driveLimit}
+          chosen={chosen?.label ?? null}
+          state={state}
+          onChoose={choose}
+        />
+        <div className="space-y-4 lg:row-span-2">
           <section aria-labelledby="positions" className="rounded-lg border border-line bg-raised">
             <h2 id="positions" className="border-b border-line px-3 py-2.5">
               Positions <span className="text-sm font-normal text-muted">rad/s²</span>
@@ -90,9 +89,13 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
           {chosen !== null && (
             <section aria-labelledby="why" className="rounded-lg border border-line bg-raised">
               <h2 id="why" className="border-b border-line px-3 py-2.5">
-                Why {chosen.label} is {chosen.verdict}
+                Why {chosen.label}: <VerdictWord verdict={chosen.verdict} />
               </h2>
-              <WhyPanel configuration={chosen} options={boundary.options} />
+              <WhyPanel
+                configuration={chosen}
+                options={boundary.options}
+                told={result.sentence.startsWith(chosen.sentence)}
+              />
               <ColumnTrials
                 fixtureId={fixtureId}
                 label={chosen.label}
@@ -102,6 +105,7 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
             </section>
           )}
         </div>
+        <Notes result={result} />
       </div>
       <BoundaryBelow boundary={boundary} result={result} />
     </>

@@ -22,7 +22,9 @@ export function FrictionLine({ fixtureId, result }: { fixtureId: number; result:
 }
 
 function sample(of: { mean: number; n: number } | null | undefined): string {
-  return of === null || of === undefined ? 'not tested' : `${formatQuantity(of.mean)} (${of.n} readings)`;
+  return of === null || of === undefined
+    ? 'not tested'
+    : `${formatQuantity(of.mean)} (${of.n} readings)`;
 }
 
 function Term({ name, value }: { name: string; value: string }) {

@@ -1,7 +1,5 @@
 import { type AnalysisOptions, type AnalysisResult } from '../../../shared/schemas/analysis.ts';
-import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
-
-const percent = (share: number) => `${formatQuantity(100 * share, { digits: 2 })} %`;
+import { percent } from './percent.ts';
 
 /** The methods behind the screen, each with its source, and what tuned them this time. */
 export function HowComputed({
@@ -33,8 +31,8 @@ export function HowComputed({
             : 'Fit: plain maximum likelihood, refused where slips and holds separate perfectly.'}
         </li>
         <li>
-          Intervals: profile likelihood of the acceleration itself at {percent(options.confidence)}.
-          An end that the trials do not bound is shown as open.
+          Intervals: profile likelihood of the acceleration itself at{' '}
+          {percent(options.confidence, 4)}. An end that the trials do not bound is shown as open.
         </li>
         <li>
           Shape: step-down search. Of all configurations the one that departs most is set apart
@@ -43,12 +41,12 @@ export function HowComputed({
         </li>
         <li>
           Level: the interval of half slip against the holding bound (kinetic friction) and the
-          letting-go bound (static friction), practical tolerance {percent(options.tolerance)}.
+          letting-go bound (static friction), practical tolerance {percent(options.tolerance, 4)}.
         </li>
         <li>
-          Margin: the limit judged is theory less {percent(options.margin)}; exact binomial count of
-          slips at or below it (Clopper and Pearson 1934) and the one-sided bound of the
-          acceleration at which {percent(options.target)} slip.
+          Margin: the limit judged is theory less {percent(options.margin, 4)}; exact binomial count
+          of slips at or below it (Clopper and Pearson 1934) and the one-sided bound of the
+          acceleration at which {percent(options.target, 4)} slip.
         </li>
         <li>
           Working limit: {options.rule}, capped by the drive and rounded down to its resolution.

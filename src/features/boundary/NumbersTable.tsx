@@ -1,6 +1,7 @@
 import { type ConfigurationResult, type Interval } from '../../../shared/schemas/analysis.ts';
 import { formatColumn, formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
+import { percent } from './percent.ts';
 
 interface NumbersTableProps {
   configurations: readonly ConfigurationResult[];
@@ -18,7 +19,6 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
   const working = column((one) => one.workingLimit, true);
   const highest = column((one) => one.highestHeld);
   const lowest = column((one) => one.lowestSlipped);
-  const share = `${formatQuantity(100 * target, { digits: 2 })} %`;
   return (
     <table className="w-full text-sm">
       <caption className="pb-2 text-left text-muted">
@@ -36,7 +36,7 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
             'Letting-go bound',
             'Half slip, own fit',
             'Half slip, one torque',
-            `${share} slip`,
+            `${percent(target, 4)} slip`,
             'Demonstrated',
             'Working limit',
           ].map((title, i) => (

@@ -15,14 +15,17 @@ const tones: Record<CheckWords['tone'], { mark: string; className: string }> = {
 export function WhyPanel({
   configuration,
   options,
+  told,
 }: {
   configuration: ConfigurationResult;
   options: AnalysisOptions;
+  /** the page's first line says the sentence already */
+  told: boolean;
 }) {
   return (
     <div className="p-3">
-      <p className="max-w-prose">{configuration.sentence}</p>
-      <dl className="mt-3 space-y-3">
+      {!told && <p className="mb-3 max-w-prose">{configuration.sentence}</p>}
+      <dl className="space-y-3">
         {checkWords(configuration, options).map(({ name, question, state, tone, words }) => (
           <div key={name}>
             <dt className="flex flex-wrap items-baseline gap-x-2">

@@ -1,5 +1,6 @@
 import { type ConfigurationResult } from '../../../shared/schemas/analysis.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { percent } from './percent.ts';
 
 /** One of the three checks in plain words: what it asks, what it found, with its numbers. */
 export interface CheckWords {
@@ -16,8 +17,6 @@ interface Given {
   confidence: number;
   target: number;
 }
-
-const percent = (share: number) => `${formatQuantity(100 * share, { digits: 2 })} %`;
 
 /** Shape, level and margin of one configuration, in this order. */
 export function checkWords(configuration: ConfigurationResult, options: Given): CheckWords[] {
@@ -76,7 +75,9 @@ function level({ level: check, theory }: ConfigurationResult): CheckWords {
     undecided: 'doubt',
     'not checked': 'quiet',
   } as const;
-  const theoryWords = bounds.length === 0 ? '' : ` Theory: ${bounds.join(', ')} rad/s².`;
+  // a level that is decided against theory names its bound already
+  const told = check.state === 'slips early' || check.state === 'holds longer';
+  const theoryWords = bounds.length === 0 || told ? '' : ` Theory: ${bounds.join(', ')} rad/s².`;
   return {
     name: 'Level',
     question: 'Does it let go where theory says?',
@@ -153,6 +154,6 @@ export function writtenP(p: number): string {
 
 function sentence(text: string): string {
   if (text === '') return '';
-  const first = text.charAt(0).toUpperCase() + text.slice(1);
+  const first = text.replace(/^[a-z]/, (letter) => letter.toUpperCase());
   return /[.!?]$/.test(first) ? first : `${first}.`;
 }

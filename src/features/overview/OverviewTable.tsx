@@ -62,20 +62,13 @@ export function OverviewCards({ rows }: { rows: readonly OverviewRow[] }) {
   return (
     <ul className="divide-y divide-line">
       {rows.map((row) => {
-        const { rate, change } = partsChange(row);
         return (
           <li key={row.fixtureId} className="py-3 first:pt-0 last:pb-0">
             <div className="flex flex-wrap items-baseline justify-between gap-x-3">
               <FixtureCell row={row} />
               <VerdictWord verdict={row.verdict} />
             </div>
-            <p className="mt-1 text-sm text-muted">
-              {row.line} · tightest {row.tightest?.label ?? '–'} at{' '}
-              {formatQuantity(row.tightest?.limit, { rounding: 'down' })} rad/s² · μ{' '}
-              {formatQuantity(row.mu50.estimate, { decimals: 3 })} fitted,{' '}
-              {formatQuantity(row.benchMu, { decimals: 3 })} bench · margin {row.margin} · {rate}{' '}
-              parts/h ({change})
-            </p>
+            <p className="mt-1 text-sm text-muted">{facts(row).join(' · ')}</p>
           </li>
         );
       })}
@@ -83,10 +76,26 @@ export function OverviewCards({ rows }: { rows: readonly OverviewRow[] }) {
   );
 }
 
+/** What is known of a fixture, in few words; what is not known is left out. */
+function facts(row: OverviewRow): string[] {
+  const { rate, change } = partsChange(row);
+  const mu = (value: number | null) => formatQuantity(value, { decimals: 3 });
+  return [
+    row.line,
+    row.tightest === null
+      ? 'no limit yet'
+      : `tightest ${row.tightest.label} at ${formatQuantity(row.tightest.limit, { rounding: 'down' })} rad/s²`,
+    ...(row.mu50.estimate === null ? [] : [`μ fitted ${mu(row.mu50.estimate)}`]),
+    ...(row.benchMu === null ? [] : [`μ bench ${mu(row.benchMu)}`]),
+    `margin: ${row.margin}`,
+    ...(rate === '–' ? [] : [`${rate} parts/h (${change} against theory)`]),
+  ];
+}
+
 function FixtureCell({ row }: { row: OverviewRow }) {
   return (
     <span>
-      <Link to={`/fixtures/${row.fixtureId}/boundary`} className="font-bold">
+      <Link to={`/fixtures/${row.fixtureId}/boundary`} className="font-bold underline">
         {row.code}
       </Link>{' '}
       <span className="text-muted">{row.name}</span>

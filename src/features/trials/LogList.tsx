@@ -3,7 +3,6 @@ import { useState } from 'react';
 import { Link } from 'react-router';
 import type { TrialLogList } from '../../../shared/schemas/trialLog.ts';
 import { formatMinute } from '../../lib/formatDate.ts';
-import { Button } from '../../ui/Button.tsx';
 import { DataTable } from '../../ui/DataTable.tsx';
 import { EmptyState } from '../../ui/EmptyState.tsx';
 import { ErrorState } from '../../ui/ErrorState.tsx';
@@ -49,14 +48,14 @@ export function LogList({ fixtureId }: { fixtureId: number }) {
               log.refused === 0 ? (
                 0
               ) : (
-                <Button
-                  look="quiet"
-                  className="min-h-7 px-2 py-0.5 text-sm"
+                <button
+                  type="button"
+                  className="cursor-pointer rounded px-1.5 py-0.5 font-bold text-accent hover:underline"
                   aria-label={`Show the ${log.refused} refused rows of ${log.fileName}`}
                   onClick={() => setRefused(log)}
                 >
                   {log.refused}, show
-                </Button>
+                </button>
               ),
           },
           {

@@ -3,7 +3,6 @@ import type { Trial } from '../../../shared/schemas/trial.ts';
 import { MarkGlyph } from '../../charts/MarkGlyph.tsx';
 import { outcomeMarks } from '../../charts/outcomeMarks.ts';
 import { trialWords } from '../../charts/trialWords.ts';
-import { Button } from '../../ui/Button.tsx';
 import { type Column, DataTable } from '../../ui/DataTable.tsx';
 import { ExcludeDialog } from './ExcludeDialog.tsx';
 import { SortHead } from './SortHead.tsx';
@@ -38,14 +37,14 @@ export function TrialTable({ trials, sort, setSort, mayExclude }: TrialTableProp
     key: 'action',
     title: <span className="sr-only">Exclude or restore</span>,
     cell: (trial) => (
-      <Button
-        look="quiet"
-        className="min-h-7 px-2 py-0.5 text-sm"
+      <button
+        type="button"
+        className="cursor-pointer rounded px-1.5 py-0.5 font-bold whitespace-nowrap text-accent hover:underline print:hidden"
         aria-label={`${trial.excluded ? 'Restore' : 'Exclude'} ${trialWords(trial)}`}
         onClick={() => setAsked(trial)}
       >
         {trial.excluded ? 'Restore…' : 'Exclude…'}
-      </Button>
+      </button>
     ),
   };
   return (

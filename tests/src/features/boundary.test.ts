@@ -69,8 +69,8 @@ describe('the three checks in words', () => {
 
   it('name both bounds of theory with their uncertainty', () => {
     const level = checkWords(configurationResult(), options)[1];
-    expect(level?.words).toContain('holding bound 18.0 ± 4.0 %');
-    expect(level?.words).toContain('letting-go bound 23.0 ± 5.0 %');
+    expect(level?.words).toContain('holding bound 18.0 ± 4 %');
+    expect(level?.words).toContain('letting-go bound 23.0 ± 5 %');
   });
 
   it('count the slips at or below the limit, with the bound by the count alone', () => {

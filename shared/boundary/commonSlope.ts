@@ -35,6 +35,8 @@ export interface CommonSlope {
   infoAB: Float64Array;
   infoBB: number;
   evaluate: (a: Float64Array, b: number, penalty: Penalty) => void;
+  /** Largest |Δη| over the cells when intercepts change by `a` and the slope by `b`. */
+  reach: (a: Float64Array, b: number) => number;
   /** Takes the trials of some groups out of the unpenalised likelihood (and puts all others back). */
   leaveOut: (groups: (group: number) => boolean) => void;
 }
@@ -93,8 +95,25 @@ export function createCommonSlope(
     infoAB: sumWz,
     infoBB: 0,
     evaluate,
+    reach,
     leaveOut,
   };
+
+  const lowest = new Float64Array(G).fill(Infinity);
+  const highest = new Float64Array(G).fill(-Infinity);
+  for (let i = 0; i < size; i++) {
+    const g = groupAt(i);
+    lowest[g] = Math.min(lowest[g], cells.z[i]);
+    highest[g] = Math.max(highest[g], cells.z[i]);
+  }
+
+  function reach(a: Float64Array, b: number): number {
+    let largest = 0;
+    for (let g = 0; g < G; g++) {
+      largest = Math.max(largest, Math.abs(a[g] + b * lowest[g]), Math.abs(a[g] + b * highest[g]));
+    }
+    return largest;
+  }
 
   function leaveOut(groups: (group: number) => boolean): void {
     for (let g = 0; g < G; g++) {

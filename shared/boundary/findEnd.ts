@@ -2,8 +2,10 @@
 export interface Profile {
   /** Deviance D ≥ 0 at x and its derivative. */
   at: (x: number) => { deviance: number; slope: number };
-  /** The same, sure to be the best of several local maxima; later calls of `at` start from it. */
+  /** D, sure to be from the best of several local maxima; later calls of `at` start from it. */
   surely: (x: number) => number;
+  /** Whether `surely` can differ from `at`. */
+  careful: boolean;
 }
 
 export interface EndSearch {
@@ -38,9 +40,11 @@ export function findEnd(profiles: readonly Profile[], search: EndSearch): number
     if (end === null) return null;
     const stuck = round > 0 && Math.abs(end - from) <= 1e-12 * (1 + Math.abs(end));
     if (stuck) return end;
+    const followed = inside;
     let lowest = Infinity;
     for (const profile of profiles) {
-      const deviance = profile.surely(end);
+      const known = profile === followed && !profile.careful;
+      const deviance = known ? search.crit : profile.surely(end);
       if (deviance < lowest) {
         lowest = deviance;
         inside = profile;
@@ -65,8 +69,10 @@ function follow(profile: Profile, search: EndSearch): number | null {
     // √D is nearly straight: its tangent says how far the crossing is
     const r = Math.sqrt(Math.max(at.deviance, 0));
     const rate = (direction * at.slope) / (2 * r);
-    const expected = r > 0.05 * root && rate > 0 ? ((root - r) / rate) * 1.02 + 1e-9 : step * 2;
-    step = Math.min(Math.max(expected, step / 8), step * 3);
+    if (r > 0.05 * root && rate > 0) {
+      const expected = ((root - r) / rate) * 1.02 + 1e-9;
+      step = Math.min(Math.max(expected, step / 8), step * 3);
+    } else if (inside !== search.from) step *= 2;
     if (bumpy) {
       const within = inside > bumpy[0] - longest && inside < bumpy[1] + longest;
       // from outside the range, halt where it begins
@@ -84,10 +90,13 @@ function follow(profile: Profile, search: EndSearch): number | null {
   // at belongs to `outside`; Newton on √D, kept inside the bracket
   let x = outside;
   for (let i = 0; i < 100; i++) {
-    if (Math.abs(at.deviance - crit) < 1e-10 * (1 + crit)) return x;
+    const miss = Math.abs(at.deviance - crit);
+    if (miss < 1e-10 * (1 + crit)) return x;
     if (Math.abs(outside - inside) <= 4e-16 * (1 + Math.abs(outside))) return inside;
     const r = Math.sqrt(Math.max(at.deviance, 0));
     const newton = x + ((root - r) * 2 * r) / at.slope;
+    // so near that the next step is exact to double precision's need: its error is of second order
+    if (miss < 1e-6 * crit && Math.abs(newton - x) < 1e-5 * search.scale) return newton;
     const [low, high] = inside < outside ? [inside, outside] : [outside, inside];
     const width = high - low;
     const usable = i < 30 && newton > low + 1e-3 * width * (i > 8 ? 1 : 0) && newton < high;

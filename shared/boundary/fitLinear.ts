@@ -40,6 +40,9 @@ export interface LinearFit {
 /** Above this many columns Fisher scoring replaces the exact Hessian, whose cost grows as the fourth power. */
 const EXACT_COLUMNS = 16;
 
+/** No step moves any η further than this: where all is certain the curvature says nothing. */
+const LONGEST = 8;
+
 /** All coefficients free. */
 export function freely(columns: number): LinearConstraint {
   const basis = new Float64Array(columns * columns);
@@ -268,7 +271,7 @@ export function fitLinear(
     for (let f = 0; f < free; f++) decrement += step[f] * gradient[f];
     lastMove = largestMove(problem, constraint, step);
     let accepted = false;
-    for (let t = 1; t > 1e-12; t /= 2) {
+    for (let t = Math.min(1, LONGEST / lastMove); t > 1e-14; t /= 2) {
       const next = gamma.map((value, f) => value + t * step[f]);
       const there = evaluate(problem, spread(next), penalised);
       const gain = there.value - state.value;

@@ -26,6 +26,7 @@ export function linearProfile(
   let warm = starts[0];
   const deviance = (there: LinearFit) => Math.max(0, 2 * (fit.value - there.value));
   return {
+    careful: starts.length > 1,
     at(x) {
       const there = fitLinear(problem, penalised, constraintAt(x), warm);
       if (there.status === 'converged') warm = there.free;

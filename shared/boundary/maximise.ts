@@ -25,13 +25,28 @@ export interface MaximiseOptions {
 
 /** Spreads the free parameters over all groups' intercepts; returns the slope. */
 function expand(constraint: Constraint, free: Float64Array, a: Float64Array): number {
-  const { reps, rep, constant, onSlope, onExtra, fixedSlope } = constraint;
-  const b = fixedSlope ?? free[reps];
+  return spread(constraint, free, a, constraint.constant, constraint.fixedSlope);
+}
+
+/** The same for a step, which moves neither the constants nor a fixed slope. */
+function expandStep(constraint: Constraint, step: Float64Array, a: Float64Array): number {
+  return spread(constraint, step, a, null, constraint.fixedSlope === null ? null : 0);
+}
+
+function spread(
+  { reps, rep, onSlope, onExtra, fixedSlope }: Constraint,
+  free: Float64Array,
+  a: Float64Array,
+  constant: Float64Array | null,
+  slope: number | null,
+): number {
+  const b = slope ?? free[reps];
   const extra = onExtra ? free[reps + (fixedSlope === null ? 1 : 0)] : 0;
   for (let g = 0; g < a.length; g++) {
     const r = rep[g];
-    a[g] =
-      (r < 0 ? 0 : free[r]) + constant[g] + onSlope[g] * b + (onExtra ? onExtra[g] * extra : 0);
+    a[g] = (r < 0 ? 0 : free[r]) + onSlope[g] * b;
+    if (constant) a[g] += constant[g];
+    if (onExtra) a[g] += onExtra[g] * extra;
   }
   return b;
 }
@@ -82,6 +97,9 @@ function projectVector(c: Constraint, onA: Float64Array, onB: number, into: Floa
     }
   }
 }
+
+/** No step moves any η further than this. */
+const LONGEST = 8;
 
 /** Up to this many free parameters a full factorisation is worth its cost. */
 const DENSE = 40;
@@ -186,7 +204,10 @@ export function maximise(
       return finish('converged', iteration, decrement / 2);
     }
     let accepted = false;
-    for (let t = 1; t > 1e-12; t /= 2) {
+    // where all is certain the curvature says nothing about how far to go
+    const slope = expandStep(constraint, step, a);
+    const reach = model.reach(a, slope);
+    for (let t = Math.min(1, LONGEST / reach); t > 1e-14; t /= 2) {
       for (let i = 0; i < dimension; i++) trial[i] = free[i] + t * step[i];
       const next = evaluateAt(trial);
       if (

@@ -24,58 +24,72 @@ const TOLERANCE = 1e-10;
  */
 export function penalisedProfile(fit: CommonSlopeFit, quantity: Quantity): Profile {
   const { model, penalised } = fit;
-  let warm: Float64Array | null = null;
-  let last = { x: NaN, deviance: NaN };
+  const path = createPath();
   const deviance = (maximum: Maximum) => Math.max(0, 2 * (penalised.value - maximum.value));
-  const first = (constraint: Constraint) => {
-    const start = new Float64Array(constraint.reps + 1);
-    constraint.rep.forEach((r, g) => {
-      if (r >= 0) start[r] = penalised.a[g]!;
-    });
-    start[constraint.reps] = penalised.b;
-    return start;
-  };
   return {
+    careful: model.careful,
     at(x) {
       const constraint = quantity.constraintAt(x);
-      const there = maximise(model, constraint, 'common', warm ?? first(constraint), {
-        tolerance: TOLERANCE,
-      });
-      if (there.status === 'converged') warm = there.free;
-      last = { x, deviance: deviance(there) };
-      return { deviance: last.deviance, slope: 2 * there.b * there.gradA[quantity.group] };
+      const start = path.at(x) ?? startFrom(fit, constraint);
+      const options = { tolerance: TOLERANCE };
+      const there = maximise(model, constraint, 'common', start, options);
+      if (there.status === 'converged') path.add(x, there.free);
+      return { deviance: deviance(there), slope: 2 * there.b * there.gradA[quantity.group] };
     },
     surely(x) {
-      if (!model.careful && x === last.x) return last.deviance;
       const constraint = quantity.constraintAt(x);
-      const there = bestMaximum(model, constraint, 'common', warm ?? first(constraint), {
-        tolerance: TOLERANCE,
-      });
-      warm = there.free;
+      const start = path.at(x) ?? startFrom(fit, constraint);
+      const there = bestMaximum(model, constraint, 'common', start, { tolerance: TOLERANCE });
+      path.restart(x, there.free);
       return deviance(there);
     },
   };
 }
 
+/** The last two points of a profile's path, to foresee the next one on their line. */
+function createPath() {
+  let last: { x: number; free: Float64Array } | null = null;
+  let before: { x: number; free: Float64Array } | null = null;
+  return {
+    at(x: number): Float64Array | null {
+      if (last === null || before === null || last.x === before.x) return last?.free ?? null;
+      const ahead = (x - last.x) / (last.x - before.x);
+      const [from, to] = [before.free, last.free];
+      return Math.abs(ahead) < 3 ? to.map((value, i) => value + ahead * (value - from[i])) : to;
+    },
+    add(x: number, free: Float64Array): void {
+      if (last !== null && last.x !== x) before = last;
+      last = { x, free };
+    },
+    restart(x: number, free: Float64Array): void {
+      before = null;
+      last = { x, free };
+    },
+  };
+}
+
+/** Free parameters of a constraint at the unconstrained estimate. */
+function startFrom({ model, penalised }: CommonSlopeFit, constraint: Constraint): Float64Array {
+  const start = new Float64Array(constraint.reps + 1);
+  for (let g = 0; g < model.groups; g++) {
+    if (constraint.rep[g] >= 0) start[constraint.rep[g]] = penalised.a[g];
+  }
+  start[constraint.reps] = penalised.b;
+  return start;
+}
+
 /** Profile of the unpenalised likelihood, suprema where the trials separate. */
 export function plainProfile(fit: CommonSlopeFit, quantity: Quantity): Profile {
-  const { model, penalised, supremum } = fit;
-  let warm: Float64Array | null = null;
+  const { model, supremum } = fit;
+  const path = createPath();
   const at = (x: number) => {
     const constraint = quantity.constraintAt(x);
-    if (warm === null) {
-      warm = new Float64Array(constraint.reps + 1);
-      for (let g = 0; g < model.groups; g++) {
-        const r = constraint.rep[g];
-        if (r >= 0) warm[r] = penalised.a[g]!;
-      }
-      warm[constraint.reps] = penalised.b;
-    }
-    const there = mlSupremum(model, constraint, warm, TOLERANCE);
-    if (there.free && there.status === 'converged') warm = there.free;
+    const start = path.at(x) ?? startFrom(fit, constraint);
+    const there = mlSupremum(model, constraint, start, TOLERANCE);
+    if (there.free && there.status === 'converged') path.add(x, there.free);
     const deviance = Math.max(0, 2 * (supremum.logLik - there.logLik));
     const slope = there.gradA && there.b !== null ? 2 * there.b * there.gradA[quantity.group] : NaN;
     return { deviance, slope };
   };
-  return { at, surely: (x) => at(x).deviance };
+  return { careful: false, at, surely: (x) => at(x).deviance };
 }

@@ -21,7 +21,7 @@ type DataTableProps<Row> = {
 /** A table that scrolls within its own region on narrow screens. Numbers stand right-aligned. */
 export function DataTable<Row>({ caption, columns, rows, rowKey, sorted }: DataTableProps<Row>) {
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
+    <div className="relative overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
       <table className="w-full border-collapse text-sm">
         <caption className="sr-only">{caption}</caption>
         <thead>

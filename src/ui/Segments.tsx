@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { useId, useState } from 'react';
 
 type SegmentsProps<Value extends string> = {
   label: string;
@@ -15,6 +15,9 @@ export function Segments<Value extends string>({
   onChange,
 }: SegmentsProps<Value>) {
   const name = useId();
+  // a choice that lives in the URL comes back a moment later; until then it is shown as made
+  const [made, setMade] = useState({ from: value, to: value });
+  const shown = made.from === value ? made.to : value;
   return (
     <fieldset className="inline-flex overflow-hidden rounded-md border border-control print:hidden">
       <legend className="sr-only">{label}</legend>
@@ -27,8 +30,11 @@ export function Segments<Value extends string>({
             type="radio"
             name={name}
             value={option.value}
-            checked={option.value === value}
-            onChange={() => onChange(option.value)}
+            checked={option.value === shown}
+            onChange={() => {
+              setMade({ from: value, to: option.value });
+              onChange(option.value);
+            }}
             className="absolute inset-0 cursor-pointer opacity-0"
           />
           {option.text}

@@ -1,5 +1,5 @@
 import type { Body } from '../../../shared/schemas/buildUp.ts';
-import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { plainNumber } from '../../lib/plainNumber.ts';
 import { DataTable } from '../../ui/DataTable.tsx';
 import { shapeWords } from './shapes.ts';
 
@@ -19,7 +19,7 @@ export function BodiesTable({ bodies }: { bodies: readonly Body[] }) {
           title: 'Mass, each',
           unit: 'kg',
           numeric: true,
-          cell: ({ mass }) => formatQuantity(mass, { digits: 4 }),
+          cell: ({ mass }) => plainNumber(mass),
         },
         {
           key: 'place',

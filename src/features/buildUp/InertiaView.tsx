@@ -1,5 +1,6 @@
 import { inertiaAt } from '../../../shared/physics/inertiaPolynomial.ts';
 import { formatColumn, formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { plainNumber } from '../../lib/plainNumber.ts';
 import { DataTable } from '../../ui/DataTable.tsx';
 import { InertiaCurve } from './InertiaCurve.tsx';
 
@@ -36,7 +37,7 @@ export function InertiaView({ polynomial, slide, marks }: InertiaViewProps) {
               title: 'Position',
               unit: 'mm',
               numeric: true,
-              cell: ({ position }) => formatQuantity(position, { digits: 4 }),
+              cell: ({ position }) => plainNumber(position),
             },
             {
               key: 'inertia',

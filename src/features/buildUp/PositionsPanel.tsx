@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { Configuration } from '../../../shared/schemas/configuration.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { plainNumber } from '../../lib/plainNumber.ts';
 import { Button } from '../../ui/Button.tsx';
 import { DataTable, type Column } from '../../ui/DataTable.tsx';
 import { Panel } from '../../ui/Panel.tsx';
@@ -61,14 +62,14 @@ function columnsOf(): Column<Configuration>[] {
     {
       key: 'label',
       title: 'Label',
-      cell: ({ label }) => <span className="font-bold">{label}</span>,
+      cell: ({ label }) => <span className="font-bold whitespace-nowrap">{label}</span>,
     },
     {
       key: 'position',
       title: 'Position',
       unit: 'mm',
       numeric: true,
-      cell: ({ positionMm }) => formatQuantity(positionMm, digits),
+      cell: ({ positionMm }) => plainNumber(positionMm),
     },
     {
       key: 'computed',

@@ -1,5 +1,5 @@
 import type { Face, Fixture } from '../../../shared/schemas/fixture.ts';
-import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { plainNumber } from '../../lib/plainNumber.ts';
 import { formatDay } from '../../lib/formatDate.ts';
 
 /** What was entered of a fixture, in words. */
@@ -26,31 +26,35 @@ function factsOf({
   remark,
   updatedAt,
 }: Fixture): [string, string][] {
-  const number = (value: number) => formatQuantity(value, { digits: 4 });
   const facts: [string, string | null][] = [
     ['Status', status],
-    ['Move', `${number(move.angleDeg)}°, then ${number(move.dwell)} s at rest`],
-    ['Axis', axis.tiltDeg === 0 ? 'vertical' : `${number(axis.tiltDeg)}° from the vertical`],
-    ['Peak acceleration', `${number(drive.maxAcceleration)} rad/s²`],
-    ['Peak speed', drive.maxSpeed === null ? 'never reached' : `${number(drive.maxSpeed)} rad/s`],
-    ['Jerk limit', drive.maxJerk === null ? null : `${number(drive.maxJerk)} rad/s³`],
-    ['Limits rounded to', `${number(drive.resolution)} rad/s²`],
-    ['Mass on the seat', hold.mass === null ? 'from the build-up' : `${number(hold.mass)} kg`],
-    ['Clamp', hold.clampForce === 0 ? null : `${number(hold.clampForce)} N`],
-    ['Spring', hold.springForce === 0 ? null : `${number(hold.springForce)} N`],
+    ['Move', `${plainNumber(move.angleDeg)}°, then ${plainNumber(move.dwell)} s at rest`],
+    ['Axis', axis.tiltDeg === 0 ? 'vertical' : `${plainNumber(axis.tiltDeg)}° from the vertical`],
+    ['Peak acceleration', `${plainNumber(drive.maxAcceleration)} rad/s²`],
+    [
+      'Peak speed',
+      drive.maxSpeed === null ? 'never reached' : `${plainNumber(drive.maxSpeed)} rad/s`,
+    ],
+    ['Jerk limit', drive.maxJerk === null ? null : `${plainNumber(drive.maxJerk)} rad/s³`],
+    ['Limits rounded to', `${plainNumber(drive.resolution)} rad/s²`],
+    ['Mass on the seat', hold.mass === null ? 'from the build-up' : `${plainNumber(hold.mass)} kg`],
+    ['Clamp', hold.clampForce === 0 ? null : `${plainNumber(hold.clampForce)} N`],
+    ['Spring', hold.springForce === 0 ? null : `${plainNumber(hold.springForce)} N`],
     [
       'Vacuum',
       hold.vacuum === null
         ? null
-        : `${number(hold.vacuum.pressureDifference / 1000)} kPa on ${number(hold.vacuum.sealedAreaMm2)} mm²`,
+        : `${plainNumber(hold.vacuum.pressureDifference / 1000)} kPa on ${plainNumber(hold.vacuum.sealedAreaMm2)} mm²`,
     ],
     [
       'Vertical acceleration',
-      hold.verticalAcceleration === 0 ? null : `${number(hold.verticalAcceleration)} m/s²`,
+      hold.verticalAcceleration === 0 ? null : `${plainNumber(hold.verticalAcceleration)} m/s²`,
     ],
     [
       'Centre of mass',
-      hold.eccentricityMm === 0 ? 'on the axis' : `${number(hold.eccentricityMm)} mm off the axis`,
+      hold.eccentricityMm === 0
+        ? 'on the axis'
+        : `${plainNumber(hold.eccentricityMm)} mm off the axis`,
     ],
     ...seat.faces.map((face): [string, string] => [face.name, faceWords(face)]),
     ['Remark', remark],

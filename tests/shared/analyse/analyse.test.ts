@@ -10,7 +10,6 @@ import {
 import { arbitraryRequest } from './arbitraryRequest.ts';
 import { simulate } from './simulate.ts';
 
-
 function run(input: object): AnalysisResult {
   return analyse(analysisRequestSchema.parse(input));
 }

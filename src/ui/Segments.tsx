@@ -16,8 +16,12 @@ export function Segments<Value extends string>({
 }: SegmentsProps<Value>) {
   const name = useId();
   // a choice that lives in the URL comes back a moment later; until then it is shown as made
-  const [made, setMade] = useState({ from: value, to: value });
-  const shown = made.from === value ? made.to : value;
+  const [shown, setShown] = useState(value);
+  const [seen, setSeen] = useState(value);
+  if (seen !== value) {
+    setSeen(value);
+    setShown(value);
+  }
   return (
     <fieldset className="inline-flex overflow-hidden rounded-md border border-control print:hidden">
       <legend className="sr-only">{label}</legend>
@@ -32,7 +36,7 @@ export function Segments<Value extends string>({
             value={option.value}
             checked={option.value === shown}
             onChange={() => {
-              setMade({ from: value, to: option.value });
+              setShown(option.value);
               onChange(option.value);
             }}
             className="absolute inset-0 cursor-pointer opacity-0"

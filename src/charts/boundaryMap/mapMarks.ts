@@ -81,7 +81,7 @@ function marks(
     opacity: excluded ? 0.6 : anyFresh && !fresh ? 0.35 : 1,
     marker: {
       symbol: excluded ? excludedSymbol : symbol,
-      size: fresh ? 10 : outcome === 'held' ? 8 : 9,
+      size: (outcome === 'held' ? 7 : 8) + (fresh ? 1 : 0),
       color: paint,
       line: { color: paint, width: symbol === 'x-thin' || excluded ? 2 : 1.5 },
     },

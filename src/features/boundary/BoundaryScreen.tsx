@@ -64,7 +64,7 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
           )}
         </div>
       )}
-      <div className="mb-4 grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_24rem] lg:grid-rows-[auto_1fr]">
+      <div className="mb-4 grid grid-cols-1 items-start gap-4 lg:grid-cols-[minmax(0,1fr)_24rem] lg:grid-rows-[auto_1fr]">
         <BoundaryMap
           boundary={boundary}
           trials={trials}

@@ -14,16 +14,16 @@ export function MapTable({
     <table className="w-full text-sm">
       <thead>
         <tr>
-          <th scope="col" className="text-left">
+          <th scope="col" className="pr-3 text-left">
             Configuration
           </th>
-          <th scope="col" className="text-left">
+          <th scope="col" className="pr-3 text-left">
             Held at, rad/s²
           </th>
-          <th scope="col" className="text-left">
+          <th scope="col" className="pr-3 text-left">
             Slipped at, rad/s²
           </th>
-          <th scope="col" className="text-left">
+          <th scope="col" className="pr-3 text-left">
             Lost at, rad/s²
           </th>
         </tr>

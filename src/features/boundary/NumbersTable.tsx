@@ -1,5 +1,5 @@
 import { type ConfigurationResult, type Interval } from '../../../shared/schemas/analysis.ts';
-import { formatColumn, formatQuantity } from '../../../shared/units/formatQuantity.ts';
+import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
 import { percent } from './percent.ts';
 
@@ -12,7 +12,7 @@ interface NumbersTableProps {
 /** Every configuration's numbers; limits are rounded down. */
 export function NumbersTable({ configurations, target }: NumbersTableProps) {
   const column = (of: (one: ConfigurationResult) => number | null, down = false) =>
-    formatColumn(configurations.map(of), { rounding: down ? 'down' : 'nearest' });
+    configurations.map((one) => formatQuantity(of(one), { rounding: down ? 'down' : 'nearest' }));
   const holding = column(({ theory }) => theory.holding);
   const lettingGo = column(({ theory }) => theory.lettingGo);
   const demonstrated = column((one) => one.demonstrated, true);

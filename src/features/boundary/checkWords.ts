@@ -115,7 +115,7 @@ function marginWords(
   target: number,
 ): string {
   if (judged === null) return 'There is no limit to judge yet: test the friction first.';
-  const limit = `${formatQuantity(judged, { rounding: 'down' })} rad/s²`;
+  const limit = `${formatQuantity(judged)} rad/s²`;
   if (n === 0) {
     return `No trial ran at or below ${limit}, the limit that was judged: it rests on extrapolation only.`;
   }
@@ -143,7 +143,7 @@ function formatEnd(end: number | null): string {
 
 /** `0.03`, and `< 0.001` where more digits would mean nothing. */
 export function formatP(p: number): string {
-  return p < 0.001 ? '< 0.001' : formatQuantity(p, { digits: 2 });
+  return p < 0.001 ? '< 0.001' : String(Number(p.toPrecision(2)));
 }
 
 /** p with its sign, to stand after the letter: `= 0.03`, `< 0.001`. */

@@ -9,7 +9,12 @@ export function RowProblems({
   title: string;
 }) {
   return (
-    <div className="max-h-96 overflow-auto" tabIndex={0} role="region" aria-label={title}>
+    <div
+      className="max-h-96 overflow-auto"
+      tabIndex={0}
+      role="region"
+      aria-label={`${title}, as a table`}
+    >
       <table className="w-full text-sm">
         <caption className="sr-only">{title}</caption>
         <thead>

@@ -26,8 +26,8 @@ export function UploadDone({ fixtureId, fileName, answer, again }: UploadDonePro
           ? `${counted(log.accepted, 'trial')} stored`
           : 'This very file is stored already'}
       </h2>
-      <p className="mt-1 break-all text-muted">
-        {fileName}
+      <p className="mt-1 text-muted">
+        <span className="break-all">{fileName}</span>
         {log.refused > 0 && (
           <>
             , {counted(log.refused, 'row')} refused (<Link to={trials}>kept with the log</Link>)

@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
-import { type ReactNode, useState } from 'react';
+import { type ReactNode, useRef, useState } from 'react';
 import type { LogAnswer, LogMappingInput } from '../../../shared/schemas/trialLog.ts';
-import { ErrorState } from '../../ui/ErrorState.tsx';
+import { FileRefused } from './FileRefused.tsx';
 import { Loading } from '../../ui/Loading.tsx';
 import { DropZone } from './DropZone.tsx';
 import { dryRunQuery, useStoreLog } from './trialQueries.ts';
@@ -20,10 +20,12 @@ type Taken = { file: File; turn: number };
 /** A log on its way in: drop, see and mend, store, read what changed. */
 export function UploadFlow({ fixtureId, map }: UploadFlowProps) {
   const [taken, setTaken] = useState<Taken | null>(null);
+  const turns = useRef(0);
   const store = useStoreLog(fixtureId);
   const take = (file: File) => {
     store.reset();
-    setTaken({ file, turn: (taken?.turn ?? 0) + 1 });
+    turns.current += 1;
+    setTaken({ file, turn: turns.current });
   };
   if (taken === null) return <DropZone take={take} />;
   if (store.data !== undefined) {
@@ -67,7 +69,11 @@ function Review({ fixtureId, taken, take, map, store, storing, refusal }: Review
   if (read.isError) {
     return (
       <div className="space-y-4">
-        <ErrorState error={read.error} retry={() => void read.refetch()} />
+        <FileRefused
+          fileName={taken.file.name}
+          error={read.error}
+          retry={() => void read.refetch()}
+        />
         <DropZone take={take} />
       </div>
     );

@@ -59,7 +59,7 @@ export function UploadReview(props: UploadReviewProps) {
         </Notice>
       )}
       {props.refusal !== null && <ErrorState error={props.refusal} />}
-      <div className="grid items-start gap-4 lg:grid-cols-2">
+      <div className="grid grid-cols-1 items-start gap-4 lg:grid-cols-2">
         <Panel title="The file as it was understood">
           <div className="space-y-4">
             {answer.headers.length > 0 && (

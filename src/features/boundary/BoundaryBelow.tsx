@@ -22,7 +22,7 @@ export function BoundaryBelow({
       <Panel title="Numbers">
         <FrictionLine fixtureId={fixtureId} result={result} />
         <div
-          className="mt-4 overflow-x-auto"
+          className="mt-4 overflow-x-auto print:overflow-visible"
           tabIndex={0}
           role="region"
           aria-label="Numbers of each configuration"

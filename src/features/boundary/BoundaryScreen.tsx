@@ -54,8 +54,9 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
         <div className="mb-4 space-y-2">
           {excluded > 0 && (
             <Notice>
-              {excluded === 1 ? 'One trial is excluded' : `${excluded} trials are excluded`} by hand
-              and does not count here.{' '}
+              {excluded === 1
+                ? 'One trial is excluded by hand and does not count here.'
+                : `${excluded} trials are excluded by hand and do not count here.`}{' '}
               <Link to={`/fixtures/${fixtureId}/trials?excluded=true`}>See which, and why</Link>
             </Notice>
           )}

@@ -20,7 +20,7 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
   const highest = column((one) => one.highestHeld);
   const lowest = column((one) => one.lowestSlipped);
   return (
-    <table className="w-full text-sm">
+    <table className="w-full text-sm print:text-[0.55rem]">
       <caption className="pb-2 text-left text-muted">
         Accelerations in rad/s², intervals in brackets; “–” means these trials give none.
       </caption>
@@ -43,7 +43,7 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
             <th
               key={title}
               scope="col"
-              className={`border-b border-line px-2 py-1 align-bottom font-bold ${i === 0 ? 'text-left' : 'text-right'}`}
+              className={`border-b border-line px-2 py-1 print:px-0.5 align-bottom font-bold ${i === 0 ? 'text-left' : 'text-right'}`}
             >
               {title}
             </th>
@@ -53,7 +53,10 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
       <tbody>
         {configurations.map((one, i) => (
           <tr key={one.label} className="border-b border-line">
-            <th scope="row" className="px-2 py-1 text-left font-bold whitespace-nowrap">
+            <th
+              scope="row"
+              className="px-2 py-1 print:px-0.5 text-left font-bold whitespace-nowrap"
+            >
               {one.label}
             </th>
             {[
@@ -69,7 +72,10 @@ export function NumbersTable({ configurations, target }: NumbersTableProps) {
               demonstrated[i],
               working[i],
             ].map((value, at) => (
-              <td key={at} className="px-2 py-1 text-right whitespace-nowrap tabular-nums">
+              <td
+                key={at}
+                className="px-2 py-1 print:px-0.5 text-right whitespace-nowrap tabular-nums"
+              >
                 {value}
               </td>
             ))}

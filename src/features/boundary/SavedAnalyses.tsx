@@ -18,7 +18,7 @@ export function SavedAnalyses({ fixtureId }: { fixtureId: number }) {
   }
   return (
     <DataTable
-      caption="Saved analyses"
+      caption="Saved analyses, newest first"
       rows={saved.data.items}
       rowKey={({ id }) => id}
       columns={[

@@ -41,17 +41,12 @@ export function checkRequest(request: AnalysisRequest): RequestProblem[] {
   });
   if (request.trials.length === 0)
     problems.push({ path: 'trials', message: 'send at least one trial' });
-  for (const [field, named] of [
-    ['workingLimits', request.workingLimits],
-    ['inertiaRelativeUncertainty', request.inertiaRelativeUncertainty],
-  ] as const) {
-    for (const label of Object.keys(named ?? {})) {
-      if (!inertia.has(label)) {
-        problems.push({
-          path: `${field}.${label}`,
-          message: 'names a configuration without trials; check the label',
-        });
-      }
+  for (const label of Object.keys(request.workingLimits ?? {})) {
+    if (!inertia.has(label)) {
+      problems.push({
+        path: `workingLimits.${label}`,
+        message: 'names a configuration without trials; check the label',
+      });
     }
   }
   return problems.slice(0, MOST);

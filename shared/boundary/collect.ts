@@ -162,3 +162,26 @@ function toCells(
     },
   };
 }
+
+/**
+ * The same data without the configurations that have no trial in the fit (all their trials being
+ * step-up series), and the place of each remaining one in the whole.
+ */
+export function withTrials(data: BoundaryData): { data: BoundaryData; places: number[] } {
+  const { configurations, cells } = data;
+  const places = configurations.flatMap((c, i) => (c.trials.length > 0 ? [i] : []));
+  if (places.length === configurations.length) return { data, places };
+  const kept = new Map(places.map((place, i) => [place, i]));
+  return {
+    places,
+    data: {
+      ...data,
+      configurations: places.map((place) => configurations[place]),
+      cells: {
+        ...cells,
+        configurations: places.length,
+        configuration: cells.configuration.map((place) => kept.get(place)!),
+      },
+    },
+  };
+}

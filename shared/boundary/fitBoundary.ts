@@ -1,7 +1,8 @@
 import type { AnalysisRequest, AnalysisResult, Link } from '../schemas/analysis.ts';
 import { chiSquareQuantile } from '../numeric/distributions.ts';
 import { apart, withShifts } from './cells.ts';
-import { collect, isFailure, type BoundaryData } from './collect.ts';
+import { collect, isFailure, withTrials, type BoundaryData } from './collect.ts';
+import { unfitted } from './modelFit.ts';
 import { compareModels, powerAgainstOffsets, type Comparison } from './compareModels.ts';
 import { drift, heterogeneity, type Heterogeneity } from './diagnostics.ts';
 import { fitCommonSlope, type CommonSlopeFit } from './fitCommonSlope.ts';
@@ -77,6 +78,50 @@ export interface BoundaryFit {
   drift: { change: number | null; p: number | null; note: string | null };
 }
 
+const NO_ESTIMATE: Estimate = { estimate: null, lower: null, upper: null, absence: 'not fitted' };
+
+/** A configuration none of whose trials is in the fit. */
+const UNFITTED: ConfigurationFit = {
+  alpha50: { scaled: NO_ESTIMATE, offsets: NO_ESTIMATE },
+  source: 'scaled',
+  level50: NO_ESTIMATE,
+  target: NO_ESTIMATE,
+  ratio: NO_ESTIMATE,
+  ratioNarrow: NO_ESTIMATE,
+  p: null,
+  setApart: null,
+  demonstrated: null,
+};
+
+/** Only step-up series were sent: nothing is fitted, everything says so. */
+function nothingToFit(request: FitRequest, data: BoundaryData): BoundaryFit {
+  const { estimator, link, failure, confidence, target } = request;
+  const none = { estimate: null, lower: null, upper: null };
+  return {
+    data,
+    settings: { estimator, link, failure, confidence, target },
+    separation: separation(data.cells),
+    models: {
+      scaled: unfitted('singular', ['intercept', 'slope']),
+      power: {
+        ...unfitted('singular', ['intercept', 'lnAcceleration', 'lnInertia']),
+        exponent: none,
+      },
+      offsets: unfitted('singular', []),
+      separate: unfitted('singular', []),
+    },
+    comparisons: [],
+    powerAgainstOffsets: null,
+    exponentAbsence: 'not fitted',
+    torque50: NO_ESTIMATE,
+    commonTorque50: NO_ESTIMATE,
+    noCommonCurve: false,
+    configurations: data.configurations.map(() => UNFITTED),
+    heterogeneity: { ratio: null, p: null, factor: 1, between: null, clusters: 0 },
+    drift: { change: null, p: null, note: 'Drift is not judged: no trial is left in the fit.' },
+  };
+}
+
 const EMPTY: ProfileInterval = { estimate: null, lower: null, upper: null, absence: 'not fitted' };
 
 function toEstimate(interval: ProfileInterval, convert: (x: number) => number): Estimate {
@@ -106,7 +151,9 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
   const checkBasis: Basis = penalised ? 'guarded' : 'plain';
   const link = linkFunction(request.link);
   const failed = isFailure(failure);
-  const data = collect(request);
+  const whole = collect(request);
+  const { data, places } = withTrials(whole);
+  if (places.length === 0) return nothingToFit(request, whole);
   const { cells, centre, configurations } = data;
   const count = configurations.length;
   const labels = configurations.map((c) => c.label);
@@ -140,10 +187,11 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
   const demonstrated = demonstratedLimits();
   const exponent = exponentInterval(models.power, penalised, critWide);
 
+  const fitted = labels.map((_, c) => configurationFit(c));
   return {
-    data,
+    data: whole,
     settings: { estimator, link: request.link, failure, confidence, target },
-    separation: separation(cells),
+    separation: separation(whole.cells),
     models: withExponent(describeModels(data, models, penalised)),
     comparisons: compareModels(data, models, penalised),
     powerAgainstOffsets: powerAgainstOffsets(data, models, penalised),
@@ -151,7 +199,7 @@ export function fitBoundary(request: FitRequest): BoundaryFit {
     torque50: torque(scaled50),
     commonTorque50: noCommonCurve ? torque(EMPTY) : torque(common50),
     noCommonCurve,
-    configurations: labels.map((_, c) => configurationFit(c)),
+    configurations: whole.configurations.map((_, c) => fitted[places.indexOf(c)] ?? UNFITTED),
     heterogeneity: scatter,
     drift: drift(data, link, penalised, failed),
   };

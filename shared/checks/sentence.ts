@@ -1,6 +1,7 @@
 import type { AnalysisRequest, ConfigurationResult } from '../schemas/analysis.ts';
 import type { Verdict } from '../schemas/verdict.ts';
 import type { ConfigurationFit } from '../boundary/fitBoundary.ts';
+import { successRun } from '../numeric/distributions.ts';
 import { acceleration, count, digits, percent, range } from './text.ts';
 
 /** What a sentence may name. */
@@ -75,7 +76,8 @@ export function sentenceOf(facts: SentenceFacts, options: Options): string {
         lower === null
           ? `where ${target} slip has no lower bound yet`
           : `${target} slip at ${acceleration(lower)} or above`;
-      return `${label} does not show its limit of ${acceleration(margin.judged ?? 0)}: ${slip}${known}. Lower the limit or run more trials${near(facts)}. ${toTheLimit(facts)}`;
+      const proof = successRun(options.confidence, 1 - options.target);
+      return `${label} does not show its limit of ${acceleration(margin.judged ?? 0)}: ${slip}${known}. Lower the limit, or run more trials${near(facts)}; ${count(proof, 'trial')} at the limit without a slip would prove it by themselves. ${toTheLimit(facts)}`;
     }
     case 'undecided':
       return `${label} is undecided: ${letsGo(facts)}. ${level.reason}`;

@@ -12,7 +12,7 @@ export function shapeCheck(
 ): ConfigurationResult['shape'] {
   const own = fit.configurations[c];
   const { estimate: ratio, lower, upper } = own.ratio;
-  if (fit.configurations.length === 1) {
+  if (fit.data.configurations.filter(({ trials }) => trials.length > 0).length < 2) {
     return { ratio: null, lower: null, upper: null, p: null, state: 'not applicable' };
   }
   const shape = { ratio, lower, upper, p: own.p };

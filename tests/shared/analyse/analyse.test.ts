@@ -296,6 +296,22 @@ describe('step-up series', () => {
     expect(result.notes.join(' ')).toMatch(/1 step-up series \(4 trials\) stayed out/);
   });
 
+  it('a configuration with nothing but a series is reported without numbers, the others as ever', () => {
+    const lone = series.map((trial) => ({ ...trial, configuration: 'x', inertia: 1e-3 }));
+    const result = run({ trials: [...lone, ...single] });
+    const without = run({ trials: single });
+    expect(result.configurations[0].trials).toBe(0);
+    expect(result.configurations[0].alpha50.offsets).toEqual({
+      estimate: null,
+      lower: null,
+      upper: null,
+    });
+    expect(result.torque50.estimate!).toBeCloseTo(without.torque50.estimate!, 12);
+    expect(result.models.offsets.coefficients.map((c) => c.name)).toEqual(['20 mm', 'slope']);
+    expect(run({ trials: lone }).status).toBe('singular');
+    expect(nonFinite(run({ trials: lone }))).toEqual([]);
+  });
+
   it('trials that merely share a name do not make a series', () => {
     const mixed = series.map((trial) => ({ ...trial, outcome: 'slipped' }));
     expect(run({ trials: [...single, ...mixed] }).configurations[0].trials).toBe(24);

@@ -24,7 +24,7 @@ export function BoundaryPage() {
       void boundary.refetch();
       void trials.refetch();
     };
-    return <ErrorState error={error} retry={retry} />;
+    return <ErrorState page error={error} retry={retry} />;
   }
   if (boundary.data === undefined || trials.data === undefined) return <Loading />;
   const { result, reason, buildUpRevision } = boundary.data;

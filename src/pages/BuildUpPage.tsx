@@ -27,7 +27,7 @@ export function BuildUpPage() {
   const { data: buildUps, error, refetch } = useQuery(buildUpsQuery(id));
   const { data: positions } = useQuery(positionsQuery(id));
   const [editing, setEditing] = useState(false);
-  if (error !== null) return <ErrorState error={error} retry={() => void refetch()} />;
+  if (error !== null) return <ErrorState page error={error} retry={() => void refetch()} />;
   if (fixture === undefined || buildUps === undefined || positions === undefined)
     return <Loading />;
   const current = buildUps.items[0] ?? null;

@@ -20,7 +20,7 @@ const places = [
 export function FixtureLayout() {
   const id = useFixtureId();
   const { data: fixture, error, refetch } = useQuery(fixtureQuery(id));
-  if (error !== null) return <ErrorState error={error} retry={() => void refetch()} />;
+  if (error !== null) return <ErrorState page error={error} retry={() => void refetch()} />;
   if (fixture === undefined) return <Loading />;
   return (
     <>

@@ -26,7 +26,7 @@ export function GripPage() {
   const { data: tests, error, refetch } = useQuery(gripQuery(id));
   const { data: boundary } = useQuery(boundaryQuery(id));
   const [adding, setAdding] = useState(false);
-  if (error !== null) return <ErrorState error={error} retry={() => void refetch()} />;
+  if (error !== null) return <ErrorState page error={error} retry={() => void refetch()} />;
   if (fixture === undefined || tests === undefined) return <Loading />;
   return (
     <>

@@ -5,7 +5,7 @@ import { ErrorState } from '../ui/ErrorState.tsx';
 export function PageError() {
   return (
     <div className="mx-auto max-w-2xl p-6">
-      <ErrorState error={useRouteError()} retry={() => window.location.reload()} />
+      <ErrorState page error={useRouteError()} retry={() => window.location.reload()} />
     </div>
   );
 }

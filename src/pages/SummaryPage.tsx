@@ -21,7 +21,7 @@ export function SummaryPage() {
   const { data: boundary, error, refetch } = useQuery(boundaryQuery(id));
   const mayEdit = useMay('editFixtures');
   useTitle(fixture?.code ?? 'Fixture');
-  if (error !== null) return <ErrorState error={error} retry={() => void refetch()} />;
+  if (error !== null) return <ErrorState page error={error} retry={() => void refetch()} />;
   if (fixture === undefined || boundary === undefined) return <Loading />;
   const { result } = boundary;
   return (

@@ -36,7 +36,7 @@ function times({ shape: { ratio, lower, upper } }: SentenceFacts): string {
 }
 
 function slipsAt({ margin }: SentenceFacts): string {
-  return `${count(margin.slipsAtOrBelow, 'slip')} in ${count(margin.trialsAtOrBelow, 'trial')} at or below ${acceleration(margin.judged ?? 0)}`;
+  return `${margin.slipsAtOrBelow === 0 ? 'no slip' : count(margin.slipsAtOrBelow, 'slip')} in ${count(margin.trialsAtOrBelow, 'trial')} at or below ${acceleration(margin.judged ?? 0)}`;
 }
 
 function toTheLimit(facts: SentenceFacts): string {
@@ -95,7 +95,7 @@ export function sentenceOf(facts: SentenceFacts, options: Options): string {
     case 'late':
       return `${label} is late: it carries ${times(facts)} of the torque of the others. Look at what holds better there before relying on it.`;
     case 'in line':
-      return `${label} is in line: ${letsGo(facts)}, theory says ${range(theory.holding, theory.lettingGo)}; the limit of ${acceleration(margin.judged ?? 0)} is shown (${slipsAt(facts)}).`;
+      return `${label} is in line: ${letsGo(facts)}, theory says ${range(theory.holding, theory.lettingGo)}; the limit of ${acceleration(margin.judged ?? 0)} is shown ${margin.trialsAtOrBelow === 0 ? '(from the curve; no trial lies that low)' : `(${slipsAt(facts)})`}.`;
   }
 }
 

@@ -1,9 +1,3 @@
-/** Where an axis is marked, and what is written there. */
-export interface AxisTicks {
-  values: number[];
-  labels: string[];
-}
-
 const steps: readonly number[][] = [
   [1],
   [1, 3],

@@ -6,13 +6,13 @@ import { alongX, type MapFrame } from './mapFrame.ts';
 import { type MapScene } from './mapScene.ts';
 
 /** A curve ready to draw; a null height is a gap. */
-export interface Curve {
+interface Curve {
   x: number[];
   y: (number | null)[];
 }
 
 /** Acceleration τ/J along x; τ in N·m, one number or by place. */
-export function torqueCurve(
+function torqueCurve(
   scene: MapScene,
   xs: readonly number[],
   torque: number | ((x: number) => number),

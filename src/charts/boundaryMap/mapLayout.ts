@@ -10,6 +10,8 @@ type Axis = NonNullable<Layout['xaxis']>;
 /** Axes, the column heads and the highlight of the chosen configuration. */
 export function mapLayout(scene: MapScene, frame: MapFrame, theme: ChartTheme): Partial<Layout> {
   return {
+    // a zoom stays when another configuration is chosen, and goes with another view
+    uirevision: `${scene.view} ${scene.scale}`,
     xaxis: scene.view === 'inertia' ? inertiaAxis(frame) : positionAxis(frame),
     yaxis: {
       ...axis(frame.y, frame.yLog),
@@ -52,7 +54,7 @@ function positionAxis(frame: MapFrame): Partial<Axis> {
 }
 
 /** Five or so round marks of a linear axis. */
-export function linearTicks([from, to]: readonly [number, number]): number[] {
+function linearTicks([from, to]: readonly [number, number]): number[] {
   const rough = (to - from) / 5;
   const decade = 10 ** Math.floor(Math.log10(rough));
   const step = ([1, 2, 5, 10].find((factor) => factor * decade >= rough) ?? 10) * decade;

@@ -1,13 +1,12 @@
 import { useState } from 'react';
-import { Link } from 'react-router';
 import type { AnalysisResult, Boundary } from '../../../shared/schemas/analysis.ts';
 import type { Trial } from '../../../shared/schemas/trial.ts';
 import { VerdictWord } from '../../charts/VerdictWord.tsx';
 import { useMay } from '../../lib/session.ts';
-import { Notice } from '../../ui/Notice.tsx';
 import { PageHeader } from '../../ui/PageHeader.tsx';
 import { BoundaryBelow } from './BoundaryBelow.tsx';
 import { BoundaryMap } from './BoundaryMap.tsx';
+import { BoundaryNotices } from './BoundaryNotices.tsx';
 import { ColumnTrials } from './ColumnTrials.tsx';
 import { trialMark } from './mapSceneOf.ts';
 import { Notes } from './Notes.tsx';
@@ -29,7 +28,7 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
   const state = useMapView();
   const maySave = useMay('saveAnalyses');
   const [marked, setMarked] = useState<string | null>(null);
-  const { fixtureId, excluded, lastSaved, digest } = boundary;
+  const { fixtureId } = boundary;
   const chosen =
     result.configurations.find(({ label }) => label === state.position) ??
     worstConfiguration(result.configurations);
@@ -50,21 +49,7 @@ export function BoundaryScreen({ boundary, result, trials, driveLimit }: Boundar
       >
         <p>{result.sentence}</p>
       </PageHeader>
-      {(excluded > 0 || (lastSaved !== null && lastSaved.digest !== digest)) && (
-        <div className="mb-4 space-y-2">
-          {excluded > 0 && (
-            <Notice>
-              {excluded === 1
-                ? 'One trial is excluded by hand and does not count here.'
-                : `${excluded} trials are excluded by hand and do not count here.`}{' '}
-              <Link to={`/fixtures/${fixtureId}/trials?excluded=true`}>See which, and why</Link>
-            </Notice>
-          )}
-          {lastSaved !== null && lastSaved.digest !== digest && (
-            <Notice tone="warning">The last saved analysis is older than the data.</Notice>
-          )}
-        </div>
-      )}
+      <BoundaryNotices boundary={boundary} result={result} />
       <div className="mb-4 grid grid-cols-1 items-start gap-4 lg:grid-cols-[minmax(0,1fr)_24rem] lg:grid-rows-[auto_1fr]">
         <BoundaryMap
           boundary={boundary}

@@ -38,7 +38,12 @@ export function UploadMap({ fixtureId, rows }: UploadMapProps) {
       draw={draw}
       alternative={`Acceleration against position: ${rows.length} new trials in front of the ${trials?.length ?? 0} stored ones.`}
       height="h-[18rem]"
-      chartKey={<MapKey drawn={[]} excluded={false} />}
+      chartKey={
+        <>
+          <MapKey drawn={[]} excluded={false} />
+          <p className="mt-1 text-sm text-muted">Trials that are stored already are faint.</p>
+        </>
+      }
       tableTitle="The new trials as a table"
       table={<RowsTable rows={rows} />}
     />

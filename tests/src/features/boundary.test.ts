@@ -69,14 +69,14 @@ describe('the three checks in words', () => {
 
   it('name both bounds of theory with their uncertainty', () => {
     const level = checkWords(configurationResult(), options)[1];
-    expect(level?.words).toContain('holding bound 18.0 ± 4 %');
-    expect(level?.words).toContain('letting-go bound 23.0 ± 5 %');
+    expect(level?.words).toContain('holding bound 18.0 ± 4\u00A0%');
+    expect(level?.words).toContain('letting-go bound 23.0 ± 5\u00A0%');
   });
 
   it('count the slips at or below the limit, with the bound by the count alone', () => {
     const margin = checkWords(configurationResult(), options)[2];
     expect(margin?.words).toBe(
-      'No slip in 6 trials at or below 12.6 rad/s²; by the count alone at most 39 % slip there (95 % confidence).',
+      'No slip in 6 trials at or below 12.6 rad/s²; by the count alone at most 39\u00A0% slip there (95\u00A0% confidence).',
     );
   });
 

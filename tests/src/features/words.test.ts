@@ -104,10 +104,10 @@ describe('trust in the fit', () => {
 describe('small words', () => {
   it('write a share without idle zeros', () => {
     expect([percent(0.01), percent(0.393), percent(0.044), percent(0.9995, 4)]).toEqual([
-      '1 %',
-      '39 %',
-      '4.4 %',
-      '99.95 %',
+      '1\u00A0%',
+      '39\u00A0%',
+      '4.4\u00A0%',
+      '99.95\u00A0%',
     ]);
   });
 

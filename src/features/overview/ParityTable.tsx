@@ -1,3 +1,4 @@
+import { Link } from 'react-router';
 import { type ParityPoint } from '../../../shared/schemas/overview.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
@@ -28,7 +29,13 @@ export function ParityTable({ points }: { points: readonly ParityPoint[] }) {
       <tbody>
         {points.map((point) => (
           <tr key={`${point.fixtureId} ${point.label}`} className="border-t border-line">
-            <td className="py-1">{point.code}</td>
+            <td className="py-1">
+              <Link
+                to={`/fixtures/${point.fixtureId}/boundary?position=${encodeURIComponent(point.label)}`}
+              >
+                {point.code}
+              </Link>
+            </td>
             <td className="py-1">{point.label}</td>
             <td className="py-1 text-right tabular-nums">{formatQuantity(point.theory)}</td>
             <td className="py-1 text-right tabular-nums">{formatRange(point.fitted)}</td>

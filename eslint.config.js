@@ -22,7 +22,9 @@ export default tseslint.config(
   {
     files: ['**/*.{ts,tsx}'],
     extends: [...tseslint.configs.recommendedTypeChecked],
-    languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
+    languageOptions: {
+      parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname },
+    },
     rules: {
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
@@ -33,6 +35,10 @@ export default tseslint.config(
     },
   },
   { files: ['**/*.{js,mjs}'], languageOptions: { globals: globals.node } },
+  {
+    files: ['public/**/*.js', 'scripts/screens.mjs'],
+    languageOptions: { globals: globals.browser },
+  },
   {
     files: ['shared/**/*.ts'],
     rules: forbid(
@@ -57,19 +63,26 @@ export default tseslint.config(
   },
   {
     files: ['src/ui/**/*.{ts,tsx}', 'src/lib/**/*.{ts,tsx}'],
-    rules: forbid(
-      [['**/server/**', '**/features/**', '**/pages/**', '**/charts/**'], 'ui and lib know no domain'],
-    ),
+    rules: forbid([
+      ['**/server/**', '**/features/**', '**/pages/**', '**/charts/**'],
+      'ui and lib know no domain',
+    ]),
   },
   {
     files: ['src/charts/**/*.{ts,tsx}'],
-    rules: forbid([['**/server/**', '**/features/**', '**/pages/**'], 'charts draw what they are given']),
+    rules: forbid([
+      ['**/server/**', '**/features/**', '**/pages/**'],
+      'charts draw what they are given',
+    ]),
   },
   {
     files: ['src/features/**/*.{ts,tsx}'],
     rules: forbid(
       [['**/server/**', '**/pages/**'], 'pages compose features, not the other way round'],
-      [['../../features/**', '../[a-z]*/**', '!../../shared/**'], 'features do not import each other'],
+      [
+        ['../../features/**', '../[a-z]*/**', '!../../shared/**'],
+        'features do not import each other',
+      ],
     ),
   },
   prettier,

@@ -33,25 +33,18 @@ async function main() {
 
   const mariadb = await startMariadb(dataFolder);
   const stopFirst = { child: null };
-  const interrupted = new Promise((resolve) => {
-    for (const signal of ['SIGINT', 'SIGTERM']) {
-      process.on(signal, () => {
-        // The server gets SIGTERM even when the terminal sent SIGINT to all of us: it ignores the second.
-        stopFirst.child?.kill('SIGTERM');
-        resolve();
-      });
-    }
-  });
-  let code = 1;
+  for (const signal of ['SIGINT', 'SIGTERM']) {
+    // A terminal sends SIGINT to the server too; it ignores the second signal.
+    process.on(signal, () => stopFirst.child?.kill('SIGTERM'));
+  }
   try {
-    code = await serve(mariadb, stopFirst, interrupted);
+    process.exitCode = await serve(mariadb, stopFirst);
   } finally {
     await mariadb.stop();
   }
-  process.exitCode = code;
 }
 
-async function serve(mariadb, stopFirst, interrupted) {
+async function serve(mariadb, stopFirst) {
   const secrets = instanceSecrets(dataFolder);
   const env = {
     ...process.env,
@@ -76,7 +69,6 @@ async function serve(mariadb, stopFirst, interrupted) {
   stopFirst.child = child;
   if (!production) printSignIns();
   else printFirstAdministrator();
-  void interrupted;
   return ended;
 }
 

@@ -9,6 +9,7 @@ const envSchema = z.object({
   TAUTLINE_ORIGIN: z.url().optional(),
   TAUTLINE_TRUST_PROXY: z.string().default(''),
   TAUTLINE_SESSION_SECRET: z.string().default(''),
+  TAUTLINE_DEV: z.enum(['0', '1']).default('0'),
   TAUTLINE_DEMO: z.enum(['0', '1']).default('0'),
   TAUTLINE_DB_HOST: z.string().default('127.0.0.1'),
   TAUTLINE_DB_PORT: port,
@@ -39,6 +40,8 @@ export type Env = {
   /** Newest first; older ones still open the sessions they signed. */
   sessionSecrets: string[];
   demo: boolean;
+  /** Vite inside this server, with hot reload. */
+  hotReload: boolean;
   database: DatabaseSettings;
   migration: DatabaseSettings | null;
   bcryptCost: number;
@@ -87,6 +90,7 @@ export function readEnv(source: Record<string, string | undefined>): Env {
       .filter((s) => s !== ''),
     sessionSecrets,
     demo: values.TAUTLINE_DEMO === '1',
+    hotReload: values.TAUTLINE_DEV === '1' && !production,
     database: { ...database, user: values.TAUTLINE_DB_USER, password: values.TAUTLINE_DB_PASSWORD },
     migration:
       values.TAUTLINE_DB_MIGRATION_USER === undefined

@@ -22,7 +22,7 @@ async function main(): Promise<void> {
   if (env.demo) await seedDemo(deps);
 
   const server = createServer();
-  const app = createApp(deps, await pages(server));
+  const app = createApp(deps, await pages(server, env.hotReload));
   server.on('request', app.express);
   setTimeouts(server);
   const sweep = setInterval(() => {
@@ -43,8 +43,11 @@ async function main(): Promise<void> {
 }
 
 /** Vite inside the same server while developing; the build otherwise. */
-async function pages(server: ReturnType<typeof createServer>): Promise<RequestHandler> {
-  if (process.env.TAUTLINE_DEV === '1') {
+async function pages(
+  server: ReturnType<typeof createServer>,
+  hotReload: boolean,
+): Promise<RequestHandler> {
+  if (hotReload) {
     const { serveWithVite } = await import('./http/serveWithVite.ts');
     return serveWithVite(server);
   }

@@ -1,4 +1,4 @@
-import { createDocument, type ZodOpenApiPathsObject } from 'zod-openapi';
+import { createDocument } from 'zod-openapi';
 import { z } from 'zod';
 import { problemSchema } from '../shared/schemas/problem.ts';
 import type { ApiRoute } from './http/defineRoute.ts';
@@ -28,7 +28,7 @@ export function createOpenApi(routes: ApiRoute[]): unknown {
         },
       },
     },
-    paths: paths as ZodOpenApiPathsObject,
+    paths: paths,
   });
 }
 

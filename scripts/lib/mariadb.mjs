@@ -135,7 +135,11 @@ function createDataFolder(folder) {
   ]);
 }
 
-/** A port that nobody listens on right now. */
+/**
+ * A port that nobody listens on right now.
+ *
+ * @returns {Promise<number>}
+ */
 export function freePort() {
   return new Promise((resolve, reject) => {
     const probe = net.createServer();

@@ -24,7 +24,7 @@ export async function updateVersioned<Row extends Versioned>(
   const result = await manager.update(entity, where, {
     ...changes,
     version: version + 1,
-  } as QueryDeepPartialEntity<Row>);
+  });
   if (result.affected === 1) return version + 1;
   const row = await manager.findOneBy(entity, { id } as FindOptionsWhere<Row>);
   if (row === null) throw notFound('record');

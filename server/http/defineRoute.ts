@@ -75,5 +75,5 @@ export function defineRoute<
     ): Promise<RouteReply>;
   },
 ): ApiRoute {
-  return route as ApiRoute;
+  return route;
 }

@@ -1,7 +1,14 @@
 import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { errorNumber } from '../database/inTransaction.ts';
-import { malformed, ProblemError, tooLarge, unavailable, unsupported } from './problem.ts';
+import {
+  malformed,
+  notFound,
+  ProblemError,
+  tooLarge,
+  unavailable,
+  unsupported,
+} from './problem.ts';
 
 /** Writes every failure as a problem document; only what we meant to say leaves the server. */
 export function errorHandler(log: Logger): ErrorRequestHandler {
@@ -26,6 +33,7 @@ function toProblem(error: unknown): ProblemError {
     return unsupported('Send the body as plain UTF-8 JSON.');
   }
   const status = property(error, 'status');
+  if (status === 404) return notFound('file');
   if (error instanceof URIError || (typeof status === 'number' && status >= 400 && status < 500)) {
     return malformed('The request could not be read.');
   }

@@ -52,5 +52,7 @@ function fieldErrors(issue: Issue, where: string): { path: string; message: stri
       message: 'is not a field of this call; leave it out',
     }));
   }
-  return [{ path, message: issue.message }];
+  return [
+    { path, message: issue.message.endsWith('received undefined') ? 'is missing' : issue.message },
+  ];
 }

@@ -10,6 +10,7 @@ import type { ApiRoute, RouteReply, UploadedFile } from './defineRoute.ts';
 import { parseIds, parseWith, queryOf, requireJson } from './parse.ts';
 import { forbidden, malformed, notSignedIn, ProblemError } from './problem.ts';
 import { receiveUpload } from './receiveUpload.ts';
+import { requestIdOf } from './requestIdOf.ts';
 
 /**
  * Mounts declared routes. The order is the same for each: who, token, permission, and only then
@@ -91,7 +92,7 @@ async function recordRefusal(
     fixtureId: null,
     outcome: 'refused',
     summary: `${route.method.toUpperCase()} ${route.path}: ${route.summary}`,
-    requestId: String(request.id),
+    requestId: requestIdOf(request),
   });
 }
 
@@ -108,8 +109,8 @@ async function readBody(
   if (route.body === undefined) return { body: undefined, file: null };
   requireJson(request);
   await new Promise<void>((resolve, reject) => {
-    void readJson(request, response, (error?: unknown) =>
-      error === undefined ? resolve() : reject(error as Error),
+    void readJson(request, response, (error?: Error) =>
+      error === undefined ? resolve() : reject(error),
     );
   });
   if (request.body === undefined) throw malformed('Send a JSON body.');

@@ -9,7 +9,7 @@ import { behindTls } from '../auth/sessionMiddleware.ts';
  */
 export function securityHeaders(env: Env): RequestHandler {
   const tls = behindTls(env);
-  const development = env.mode === 'development';
+  const development = env.hotReload;
   return helmet({
     contentSecurityPolicy: {
       useDefaults: false,

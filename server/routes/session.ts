@@ -7,10 +7,11 @@ import { sessionCookieName } from '../auth/sessionMiddleware.ts';
 import { FailureThrottle } from '../auth/FailureThrottle.ts';
 import { isTooLong } from '../auth/passwordRules.ts';
 import { createPassport } from '../auth/signInStrategy.ts';
-import { SessionStore } from '../auth/SessionStore.ts';
+import { type SessionStore } from '../auth/SessionStore.ts';
 import type { User } from '../entities/User.ts';
 import { defineRoute, type ApiRoute } from '../http/defineRoute.ts';
 import { ProblemError, tooMany } from '../http/problem.ts';
+import { requestIdOf } from '../http/requestIdOf.ts';
 import { toSessionUser } from '../presenters/toSessionUser.ts';
 import { recordEvent } from '../services/recordEvent.ts';
 
@@ -26,8 +27,8 @@ export function sessionRoutes(deps: AppDeps, store: SessionStore): ApiRoute[] {
     const wait = throttle.retryAfter(key);
     if (wait > 0) throw tooMany(`Too many failed attempts. Try again in ${wait} s.`, wait);
     const user = await new Promise<User | false>((resolve, reject) => {
-      const done = (error: unknown, found: User | false) =>
-        error ? reject(error as Error) : resolve(found);
+      const done = (error: Error | null, found: User | false) =>
+        error ? reject(error) : resolve(found);
       const attempt = passport.authenticate('local', { session: false }, done) as (
         request: Request,
         response: unknown,
@@ -45,7 +46,7 @@ export function sessionRoutes(deps: AppDeps, store: SessionStore): ApiRoute[] {
         fixtureId: null,
         outcome: 'refused',
         summary: 'Wrong e-mail address or password',
-        requestId: String(request.id),
+        requestId: requestIdOf(request),
       });
       throw new ProblemError(401, 'Not signed in', 'The e-mail address or the password is wrong.');
     }
@@ -83,7 +84,7 @@ export function sessionRoutes(deps: AppDeps, store: SessionStore): ApiRoute[] {
           objectId: user.id,
           fixtureId: null,
           summary: `${user.name} signed in`,
-          requestId: String(request.id),
+          requestId: requestIdOf(request),
         });
         return {
           status: 200,
@@ -111,7 +112,7 @@ export function sessionRoutes(deps: AppDeps, store: SessionStore): ApiRoute[] {
       answers: { 204: null },
       async handle({ user, request, response }) {
         await new Promise<void>((resolve, reject) => {
-          request.session.destroy((error: unknown) => (error ? reject(error as Error) : resolve()));
+          request.session.destroy((error: Error | null) => (error ? reject(error) : resolve()));
         });
         if (user !== null) {
           response.clearCookie(sessionCookieName(deps.env), { path: '/' });
@@ -122,7 +123,7 @@ export function sessionRoutes(deps: AppDeps, store: SessionStore): ApiRoute[] {
             objectId: user.id,
             fixtureId: null,
             summary: `${user.name} signed out`,
-            requestId: String(request.id),
+            requestId: requestIdOf(request),
           });
         }
         return { status: 204 };
@@ -147,6 +148,6 @@ function addressLimit() {
 
 function regenerate(request: Request): Promise<void> {
   return new Promise((resolve, reject) => {
-    request.session.regenerate((error: unknown) => (error ? reject(error as Error) : resolve()));
+    request.session.regenerate((error: Error | null) => (error ? reject(error) : resolve()));
   });
 }

@@ -199,10 +199,7 @@ export async function listLogs(deps: AppDeps, fixtureId: number): Promise<TrialL
   await requireFixture(manager, fixtureId);
   const rows = await manager.find(TrialLogRow, { where: { fixtureId }, order: { id: 'DESC' } });
   return {
-    items: rows.map((row) => {
-      const { problems: _problems, mapping: _mapping, ...rest } = toTrialLog(row);
-      return rest;
-    }),
+    items: rows.map(toLogRow),
   };
 }
 
@@ -226,6 +223,10 @@ export async function getRawLog(
 }
 
 function toTrialLog(row: TrialLogRow): TrialLog {
+  return { ...toLogRow(row), problems: row.problems, mapping: row.mapping };
+}
+
+function toLogRow(row: TrialLogRow): TrialLogList['items'][number] {
   return {
     id: row.id,
     fixtureId: row.fixtureId,
@@ -234,8 +235,6 @@ function toTrialLog(row: TrialLogRow): TrialLog {
     sha256: row.sha256,
     accepted: row.accepted,
     refused: row.refused,
-    problems: row.problems,
-    mapping: row.mapping,
     createdAt: row.createdAt.toISOString(),
     createdBy: row.createdBy,
   };

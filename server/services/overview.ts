@@ -56,7 +56,7 @@ function toRow(fixture: FixtureRow, cache: BoundaryCacheRow, lastLog: Date | nul
     verdict: cache.verdict,
     sentence: cache.sentence,
     tightest:
-      tightest?.workingLimit == null
+      tightest === null || tightest.workingLimit === null
         ? null
         : { label: tightest.label, limit: tightest.workingLimit },
     mu50: result?.mu50 ?? none,

@@ -29,12 +29,12 @@ export function useMay(permission: Permission): boolean {
 export function useSignIn() {
   const client = useQueryClient();
   return {
-    async signIn(credentials: SignIn): Promise<void> {
+    signIn: async (credentials: SignIn): Promise<void> => {
       const session = await api<Session>('/api/session', { method: 'POST', body: credentials });
       client.clear();
       client.setQueryData(sessionQuery.queryKey, keepToken(session));
     },
-    async signOut(): Promise<void> {
+    signOut: async (): Promise<void> => {
       await api('/api/session', { method: 'DELETE' });
       client.clear();
     },

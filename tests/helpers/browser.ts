@@ -59,9 +59,9 @@ type AxeResult = {
 /** What axe-core finds on the page as it stands, one line a violation. */
 export async function axeViolations(page: Page): Promise<string[]> {
   await page.evaluate(axeSource);
-  const { violations } = (await page.evaluate(`axe.run(document, {
+  const { violations } = await page.evaluate<AxeResult>(`axe.run(document, {
     runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'],
-  })`)) as AxeResult;
+  })`);
   return violations.flatMap(({ id, nodes }) =>
     nodes
       .slice(0, 3)

@@ -16,7 +16,7 @@ const patience = 120_000;
 /** The product itself, as `npm start` runs it, with demo data in a folder of its own. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
   const folder = mkdtempSync(path.join(os.tmpdir(), 'tautline-product-'));
-  const port = await freePort();
+  const port: number = await freePort();
   const child = spawn(process.execPath, ['scripts/start.mjs'], {
     env: {
       ...process.env,

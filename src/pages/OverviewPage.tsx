@@ -18,7 +18,7 @@ export function OverviewPage() {
   const mayEdit = useMay('editFixtures');
   if (overview.isPending) return <Loading />;
   if (overview.isError) {
-    return <ErrorState error={overview.error} retry={() => void overview.refetch()} />;
+    return <ErrorState page error={overview.error} retry={() => void overview.refetch()} />;
   }
   const { sentence, rows, parity } = overview.data;
   if (rows.length === 0) {
@@ -43,7 +43,7 @@ export function OverviewPage() {
       <PageHeader title="Overview">
         <p>{sentence}</p>
       </PageHeader>
-      <div className="grid items-start gap-4 xl:grid-cols-[minmax(0,1fr)_28rem]">
+      <div className="grid grid-cols-1 items-start gap-4 xl:grid-cols-[minmax(0,1fr)_28rem]">
         <Panel title="Fixtures">
           <div className="hidden md:block">
             <OverviewTable rows={rows} />

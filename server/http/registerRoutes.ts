@@ -109,8 +109,8 @@ async function readBody(
   if (route.body === undefined) return { body: undefined, file: null };
   requireJson(request);
   await new Promise<void>((resolve, reject) => {
-    void readJson(request, response, (error?: Error) =>
-      error === undefined ? resolve() : reject(error),
+    void readJson(request, response, (error?: Error | string) =>
+      error === undefined ? resolve() : reject(error instanceof Error ? error : new Error(error)),
     );
   });
   if (request.body === undefined) throw malformed('Send a JSON body.');

@@ -1,3 +1,4 @@
+import { mean, sampleStandardDeviation } from 'simple-statistics';
 import type { InclineReading } from '../schemas/frictionTest.ts';
 import { toRadians } from '../units/angle.ts';
 import { requireNonNegative, requirePositive } from './requireRange.ts';
@@ -49,9 +50,7 @@ export function inclineUncertainty(mu: number, angleUncertainty: number): number
 export function frictionStatistics(mus: readonly number[]): FrictionStatistics {
   const n = mus.length;
   if (n === 0) throw new RangeError('give at least one reading');
-  const mean = mus.reduce((sum, mu) => sum + mu, 0) / n;
-  const squares = mus.reduce((sum, mu) => sum + (mu - mean) ** 2, 0);
-  return { mean, sd: n > 1 ? Math.sqrt(squares / (n - 1)) : null, n };
+  return { mean: mean([...mus]), sd: n > 1 ? sampleStandardDeviation([...mus]) : null, n };
 }
 
 /**

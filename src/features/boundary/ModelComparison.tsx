@@ -1,3 +1,4 @@
+import { torqueCurve } from '../../../shared/boundary/torqueCurve.ts';
 import { type AnalysisResult, type ModelFit } from '../../../shared/schemas/analysis.ts';
 import { formatQuantity } from '../../../shared/units/formatQuantity.ts';
 import { formatRange } from '../../charts/formatRange.ts';
@@ -19,6 +20,11 @@ export function ModelComparison({
   confidence: number;
 }) {
   const { exponent } = result.models.power;
+  const curve = torqueCurve(
+    result.configurations.flatMap(({ inertia, alpha50 }) =>
+      alpha50.offsets.estimate === null ? [] : [{ inertia, alpha50: alpha50.offsets.estimate }],
+    ),
+  );
   return (
     <div className="space-y-3">
       <ul className="max-w-prose list-disc space-y-1 pl-5">
@@ -29,7 +35,14 @@ export function ModelComparison({
         ))}
         {exponent.estimate !== null && (
           <li>
-            The torque falls with inertia to the power {formatRange(exponent)}; theory says 1.
+            The half-slip acceleration falls with inertia to the power {formatRange(exponent)};
+            theory says 1.
+          </li>
+        )}
+        {curve !== null && (
+          <li>
+            A straight line through the positions’ own half-slip points, each counted once, has the
+            slope {formatQuantity(curve.slope)} in the log–log map; τ/I has −1.
           </li>
         )}
       </ul>

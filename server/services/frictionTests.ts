@@ -1,7 +1,14 @@
 import type { EntityManager } from 'typeorm';
-import { frictionStatistics, inclineMu } from '../../shared/physics/frictionTest.ts';
+import {
+  frictionStatistics,
+  inclineMu,
+  poolFrictionTests,
+  type FrictionSample,
+} from '../../shared/physics/frictionTest.ts';
 import { fixtureTheory } from '../../shared/physics/fixtureTheory.ts';
 import type {
+  FrictionKind,
+  FrictionSummary,
   FrictionTest,
   FrictionTestInput,
   FrictionTestPatch,
@@ -27,8 +34,8 @@ export async function listFrictionTests(deps: AppDeps, fixtureId: number): Promi
   const { friction } = fixtureTheory(fixture.spec, buildUp?.content ?? null, [], rows);
   return {
     items: rows.map(toFrictionTest),
-    kinetic: friction.kinetic ?? null,
-    static: friction.static ?? null,
+    kinetic: summaryOf(friction.kinetic, rows, 'kinetic'),
+    static: summaryOf(friction.static, rows, 'static'),
   };
 }
 
@@ -98,6 +105,22 @@ export function changeFrictionTest(
     });
     return findTest(manager, id);
   });
+}
+
+/**
+ * The core's sample carries the gauge in an effective number of readings; a person is shown the
+ * readings' own scatter and number, and the uncertainty of the mean beside them.
+ */
+function summaryOf(
+  sample: FrictionSample | undefined,
+  tests: FrictionTestRow[],
+  kind: FrictionKind,
+): FrictionSummary | null {
+  const pooled = poolFrictionTests(tests.filter((test) => test.kind === kind));
+  if (sample === undefined || pooled === null) return null;
+  const { mean, sd, n } = sample;
+  const uncertainty = n > 1 ? sd / Math.sqrt(n) : null;
+  return { mean, sd: pooled.sd, n: pooled.n, uncertainty };
 }
 
 async function findTest(manager: EntityManager, id: number): Promise<FrictionTest> {

@@ -1,5 +1,14 @@
 import { z } from 'zod';
-import { idSchema, instantSchema, lineSchema, nonNegative, positive, reasonSchema, remarkSchema, versionSchema } from './common.ts';
+import {
+  idSchema,
+  instantSchema,
+  lineSchema,
+  nonNegative,
+  positive,
+  reasonSchema,
+  remarkSchema,
+  versionSchema,
+} from './common.ts';
 
 export const frictionKinds = ['kinetic', 'static'] as const;
 
@@ -45,8 +54,18 @@ export const frictionTestSchema = z
   })
   .meta({ id: 'FrictionTest' });
 
-/** What the tests of one kind say together: mean, standard deviation and number of readings. */
-export const frictionSummarySchema = z.object({ mean: z.number(), sd: z.number(), n: z.number().int() });
+/** What the tests of one kind say together. */
+export const frictionSummarySchema = z.object({
+  mean: z
+    .number()
+    .describe('of the seat: faces with tests of their own weighted by normal force × radius'),
+  sd: z.number().nullable().describe('of the readings taken together; null with one reading'),
+  n: z.number().int().describe('readings'),
+  uncertainty: z
+    .number()
+    .nullable()
+    .describe('standard uncertainty of the mean, gauge included; null with one reading'),
+});
 
 export const frictionTestsSchema = z
   .object({

@@ -42,10 +42,15 @@ function Figure({ name, summary, torquePerMu, bound }: FigureProps) {
       <dd className="text-sm text-muted">
         {summary === null
           ? 'not tested yet'
-          : `s ${formatQuantity(summary.sd, { digits: 2 })}, n ${summary.n}${torqueWords(summary.mean, torquePerMu, bound)}`}
+          : `${scatterWords(summary)}${torqueWords(summary.mean, torquePerMu, bound)}`}
       </dd>
     </div>
   );
+}
+
+function scatterWords({ sd, n, uncertainty }: FrictionSummary): string {
+  const digits = { digits: 2 };
+  return `s ${formatQuantity(sd, digits)}, n ${n}, u ${formatQuantity(uncertainty, digits)}`;
 }
 
 function torqueWords(mu: number, torquePerMu: number | null, bound: string): string {

@@ -41,6 +41,11 @@ export function toAnalysisRequest(data: FixtureData, options: AnalysisOptions): 
   }
   if (trials.length === 0) return { request: null, reason: reasonFor(data), theory };
 
+  if (trials.some(({ judgedBy }) => judgedBy === 'end mark' || judgedBy === 'by eye')) {
+    theory.notes.push(
+      'Some trials were judged by end mark or by eye: it is taken that a slip of 0.5° would have been seen.',
+    );
+  }
   const used = new Set(trials.map((trial) => trial.configuration));
   const parts = theory.configurations.filter((one) => used.has(one.label));
   const torques = parts.flatMap(({ label, torquePerMu }) =>

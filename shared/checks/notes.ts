@@ -48,14 +48,16 @@ export function notesOf(
     if (model.status === 'singular') notes.push(`Model ${name}: ${singular(name)}.`);
     if (model.status === 'iterationLimit') notes.push(`Model ${name} did not converge.`);
   }
-  explain('torque50', fit.torque50);
+  explain('The torque at half slip', fit.torque50);
   if (fit.noCommonCurve) {
-    notes.push('commonTorque50 and mu50 are null: the configurations do not share one curve.');
+    notes.push(
+      'There is no common torque and no fitted μ: the configurations do not share one curve.',
+    );
   } else if (configurations.some((c) => c.shape.state === 'early' || c.shape.state === 'late')) {
-    explain('commonTorque50', fit.commonTorque50);
+    explain('The common torque at half slip', fit.commonTorque50);
   }
   if (!fit.noCommonCurve && data.referenceTorque === null) {
-    notes.push('mu50 is null: no seat torque per unit of μ was sent.');
+    notes.push('There is no fitted μ: the seat torque per unit of μ is not known.');
   }
   if (fit.models.power.status !== 'singular') {
     const { exponent } = fit.models.power;
@@ -65,9 +67,11 @@ export function notesOf(
   fit.configurations.forEach((own, c) => {
     const { label, trials } = configurations[c];
     if (trials === 0) notes.push(`${label}: no trial is left in the fit.`);
-    if (configurations.length > 1) explain(`${label}: α₅₀ by offsets`, own.alpha50.offsets);
+    if (configurations.length > 1)
+      explain(`${label}: the half-slip acceleration of its own fit`, own.alpha50.offsets);
     explain(`${label}: ${target}`, own.target);
-    if (configurations.length > 1) explain(`${label}: the shift`, own.ratio);
+    if (configurations.length > 1)
+      explain(`${label}: its torque against that of the others`, own.ratio);
     if (trials > 0 && settings.target < 1 / trials) {
       notes.push(
         `${label}: ${target} is extrapolated, ${count(trials, 'trial')} cannot show it directly.`,
@@ -134,7 +138,7 @@ function undemonstrated(fit: BoundaryFit, request: JudgeRequest, c: number): str
     judgedByMark(own) &&
     (request.moveAngle === undefined || request.smallestVisibleSlip === undefined)
   ) {
-    return 'trials were judged by end mark or by eye: send moveAngle and smallestVisibleSlip';
+    return 'trials were judged by end mark or by eye, so the move angle and the smallest slip that would have been seen are needed (moveAngle, smallestVisibleSlip)';
   }
   return 'the smallest visible slip is as large as the move, so no slip could have been seen';
 }

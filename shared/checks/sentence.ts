@@ -83,9 +83,11 @@ export function sentenceOf(facts: SentenceFacts, options: Options): string {
       return `${label} is undecided: ${letsGo(facts)}. ${level.reason}`;
     case 'not checked': {
       const missing = [
-        level.state === 'not checked' ? 'theory (send the seat torque and friction tests)' : '',
+        level.state === 'not checked'
+          ? 'theory (that needs the seat torque and friction tests)'
+          : '',
         margin.state === 'not checked'
-          ? 'the margin (send a working limit or kinetic friction tests)'
+          ? 'the margin (that needs a working limit or kinetic friction tests)'
           : '',
       ].filter(Boolean);
       return `${label}: ${letsGo(facts)}. Not checked against ${missing.join(' and ')}.`;
@@ -119,7 +121,11 @@ export function fixtureSentence(
   if (configurations.length === 1) parts.push(configurations[0].sentence);
   else if (verdict === 'in line')
     parts.push(`All ${configurations.length} configurations are in line.`);
-  else if (concerned.length === configurations.length) {
+  else if (verdict === 'no common curve') {
+    parts.push(
+      `${concerned.map((c) => c.label).join(', ')} do not share one curve, and the trials cannot say which one is off: each is judged by itself. Compare seating and build-up of all of them.`,
+    );
+  } else if (concerned.length === configurations.length) {
     parts.push(`All ${concerned.length} configurations: ${verdict}.`, concerned[0].sentence);
   } else if (concerned.length === 1) {
     parts.push(concerned[0].sentence);

@@ -72,11 +72,6 @@ describe('notes', () => {
     const notes = ['20 mm: is far.', 'All in all.', '45 mm: is far.'];
     expect(groupNotes(notes, ['20 mm', '45 mm'])).toEqual(['20 mm, 45 mm: is far.', 'All in all.']);
   });
-
-  it('call things by the screen’s names', () => {
-    const [note] = groupNotes(['commonTorque50 and mu50 are null: why.'], []);
-    expect(note).toBe('There is no common torque and no fitted μ: why.');
-  });
 });
 
 describe('trust in the fit', () => {

@@ -46,7 +46,7 @@ export async function startMariadb(folder, { durable = true } = {}) {
 
   // Socket paths end at 107 characters; the project's own path may be longer.
   const socket = path.join(mkdtempSync(path.join(os.tmpdir(), 'tl-')), 's');
-  const port = await freePort();
+  const port = await portFor(files.state);
   const child = spawn(
     mariadbd(),
     [
@@ -75,6 +75,13 @@ export async function startMariadb(folder, { durable = true } = {}) {
   child.unref();
   writeFileSync(files.state, JSON.stringify({ pid: child.pid, port, socket }), { mode: 0o600 });
   return ready({ pid: child.pid, port, socket }, files.log);
+}
+
+/** The port of last time where it is still free: a server that waits for its database finds it again. */
+async function portFor(stateFile) {
+  if (!existsSync(stateFile)) return freePort();
+  const { port } = JSON.parse(readFileSync(stateFile, 'utf8'));
+  return freePort(port).catch(() => freePort());
 }
 
 /** A server of ours that still runs on this data, from the state file; null when there is none. */
@@ -138,20 +145,25 @@ function createDataFolder(folder) {
 /**
  * A port that nobody listens on right now.
  *
+ * @param {number} wanted - 0 = any
  * @returns {Promise<number>}
  */
-export function freePort() {
+export function freePort(wanted = 0) {
   return new Promise((resolve, reject) => {
     const probe = net.createServer();
     probe.on('error', reject);
-    probe.listen(0, '127.0.0.1', () => {
+    probe.listen(wanted, '127.0.0.1', () => {
       const { port } = probe.address();
       probe.close(() => resolve(port));
     });
   });
 }
 
-/** Secrets of an instance, made once and kept in its data folder, readable by its owner only. */
+/**
+ * Secrets of an instance, made once and kept in its data folder, readable by its owner only.
+ *
+ * @returns {{session: string, application: string, migration: string}}
+ */
 export function instanceSecrets(folder) {
   const file = path.join(folder, 'secrets.json');
   if (!existsSync(file)) {

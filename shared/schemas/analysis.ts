@@ -42,10 +42,26 @@ export const analysisOptionsSchema = z.strictObject({
     .record(label, positive.max(1e12))
     .optional()
     .describe('rad/s² per configuration: the limit the margin check judges'),
-  margin: z.number().min(0, 'must be from 0 to below 1').lt(1, 'must be from 0 to below 1').default(0.3),
-  target: z.number().min(1e-4, 'must be from 0.0001 to 0.5').max(0.5, 'must be from 0.0001 to 0.5').default(0.01),
-  tolerance: z.number().gt(0, 'must be above 0 and below 1').lt(1, 'must be above 0 and below 1').default(0.15),
-  confidence: z.number().gt(0.5, 'must be above 0.5 and at most 0.9999').max(0.9999, 'must be above 0.5 and at most 0.9999').default(0.95),
+  margin: z
+    .number()
+    .min(0, 'must be from 0 to below 1')
+    .lt(1, 'must be from 0 to below 1')
+    .default(0.3),
+  target: z
+    .number()
+    .min(1e-4, 'must be from 0.0001 to 0.5')
+    .max(0.5, 'must be from 0.0001 to 0.5')
+    .default(0.01),
+  tolerance: z
+    .number()
+    .gt(0, 'must be above 0 and below 1')
+    .lt(1, 'must be above 0 and below 1')
+    .default(0.15),
+  confidence: z
+    .number()
+    .gt(0.5, 'must be above 0.5 and at most 0.9999')
+    .max(0.9999, 'must be above 0.5 and at most 0.9999')
+    .default(0.95),
   estimator: z.enum(estimators).default('firth'),
   link: z.enum(links).default('logit'),
   failure: z.enum(failures).default('slipped'),
@@ -63,11 +79,17 @@ export const analysisRequestSchema = z
     moveAngle: positive.max(1000).optional().describe('rad'),
     smallestVisibleSlip: positive.max(1000).optional().describe('rad'),
     drive: z
-      .strictObject({ maxAcceleration: positive.max(1e12), resolution: positive.max(1e12).optional() })
+      .strictObject({
+        maxAcceleration: positive.max(1e12),
+        resolution: positive.max(1e12).optional(),
+      })
       .optional()
       .describe('rad/s²'),
     friction: z
-      .strictObject({ kinetic: frictionSampleSchema.optional(), static: frictionSampleSchema.optional() })
+      .strictObject({
+        kinetic: frictionSampleSchema.optional(),
+        static: frictionSampleSchema.optional(),
+      })
       .optional(),
     ...analysisOptionsSchema.shape,
   })
@@ -91,8 +113,21 @@ export const modelFitSchema = z.object({
   aicc: end,
 });
 
-export const shapeStates = ['not applicable', 'early', 'late', 'no common curve', 'on curve', 'undecided'] as const;
-export const levelStates = ['slips early', 'holds longer', 'in line', 'undecided', 'not checked'] as const;
+export const shapeStates = [
+  'not applicable',
+  'early',
+  'late',
+  'no common curve',
+  'on curve',
+  'undecided',
+] as const;
+export const levelStates = [
+  'slips early',
+  'holds longer',
+  'in line',
+  'undecided',
+  'not checked',
+] as const;
 export const marginStates = ['breached', 'shown', 'not shown', 'not checked'] as const;
 export const bindings = ['theory', 'demonstrated', 'drive'] as const;
 
@@ -178,7 +213,9 @@ export const storedAnalysisInputSchema = z
 
 const provenance = {
   fixtureId: idSchema,
-  digest: z.string().describe('SHA-256 over the trials, the build-up, the friction tests and the options'),
+  digest: z
+    .string()
+    .describe('SHA-256 over the trials, the build-up, the friction tests and the options'),
   buildUpRevision: z.number().int().nullable(),
 };
 
@@ -190,7 +227,9 @@ export const boundarySchema = z
     reason: z.string().nullable().describe('why there is no result yet, and what to do'),
     options: analysisOptionsSchema,
     polynomial: z.array(z.number()).nullable().describe('I(x), x in m'),
-    positions: z.array(z.object({ label: z.string(), positionMm: z.number(), inertia: z.number().nullable() })),
+    positions: z.array(
+      z.object({ label: z.string(), positionMm: z.number(), inertia: z.number().nullable() }),
+    ),
     excluded: z.number().int().describe('trials left out by hand'),
     torquePerMu: z.number().nullable(),
     lastSaved: z.object({ id: idSchema, createdAt: instantSchema, digest: z.string() }).nullable(),
@@ -233,7 +272,6 @@ export type AnalysisResult = z.infer<typeof analysisResultSchema>;
 export type ConfigurationResult = z.infer<typeof configurationResultSchema>;
 export type Interval = z.infer<typeof intervalSchema>;
 export type ModelFit = z.infer<typeof modelFitSchema>;
-export type Estimator = (typeof estimators)[number];
 export type Link = (typeof links)[number];
 export type StoredAnalysisInput = z.infer<typeof storedAnalysisInputSchema>;
 export type StoredAnalysis = z.infer<typeof storedAnalysisSchema>;

@@ -1,5 +1,13 @@
 import { z } from 'zod';
-import { idSchema, instantSchema, lineSchema, nonNegative, positive, remarkSchema, versionSchema } from './common.ts';
+import {
+  idSchema,
+  instantSchema,
+  lineSchema,
+  nonNegative,
+  positive,
+  remarkSchema,
+  versionSchema,
+} from './common.ts';
 
 const mm = positive.max(10_000);
 
@@ -9,7 +17,11 @@ export const bodyShapeSchema = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('hoop'), radiusMm: mm }),
   z.strictObject({ kind: z.literal('solid cylinder, axial'), radiusMm: mm }),
   z.strictObject({ kind: z.literal('solid cylinder, transverse'), radiusMm: mm, lengthMm: mm }),
-  z.strictObject({ kind: z.literal('hollow cylinder, axial'), outerRadiusMm: mm, innerRadiusMm: mm }),
+  z.strictObject({
+    kind: z.literal('hollow cylinder, axial'),
+    outerRadiusMm: mm,
+    innerRadiusMm: mm,
+  }),
   z.strictObject({
     kind: z.literal('hollow cylinder, transverse'),
     outerRadiusMm: mm,
@@ -53,10 +65,15 @@ export const buildUpInputSchema = z
     version: versionSchema.describe("the fixture's version this change was made on"),
     bodies: z.array(bodySchema).min(1, 'a build-up has at least one body').max(60),
     slide: z
-      .strictObject({ minMm: z.number().min(-10_000).max(10_000), maxMm: z.number().min(-10_000).max(10_000) })
+      .strictObject({
+        minMm: z.number().min(-10_000).max(10_000),
+        maxMm: z.number().min(-10_000).max(10_000),
+      })
       .refine((s) => s.minMm < s.maxMm, { path: ['maxMm'], message: 'must be above minMm' })
       .describe('range of the slide, mm'),
-    relativeUncertainty: nonNegative.max(0.5).describe('standard relative uncertainty of the computed inertia'),
+    relativeUncertainty: nonNegative
+      .max(0.5)
+      .describe('standard relative uncertainty of the computed inertia'),
     remark: remarkSchema.nullable(),
   })
   .meta({ id: 'BuildUpInput' });
@@ -82,7 +99,11 @@ export const buildUpSchema = z
   .meta({ id: 'BuildUp' });
 
 export const buildUpQuerySchema = z.strictObject({
-  revision: z.string().regex(/^[1-9][0-9]{0,6}$/, 'must be a whole number from 1').transform(Number).optional(),
+  revision: z
+    .string()
+    .regex(/^[1-9][0-9]{0,6}$/, 'must be a whole number from 1')
+    .transform(Number)
+    .optional(),
 });
 
 export type BodyShape = z.infer<typeof bodyShapeSchema>;

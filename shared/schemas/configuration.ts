@@ -27,7 +27,10 @@ export const configurationSchema = z
     fixtureId: idSchema,
     version: versionSchema,
     ...fields,
-    computedInertia: z.number().nullable().describe('kg·m² from the current build-up; null without one'),
+    computedInertia: z
+      .number()
+      .nullable()
+      .describe('kg·m² from the current build-up; null without one'),
     inertia: z.number().nullable().describe('kg·m² in force: measured, else computed'),
     inertiaRelativeUncertainty: z.number(),
     trials: z.number().int(),

@@ -18,7 +18,10 @@ export const eventSchema = z
   })
   .meta({ id: 'Event' });
 
-export const eventQuerySchema = z.strictObject({ action: z.string().max(60).optional(), ...pageQuery });
+export const eventQuerySchema = z.strictObject({
+  action: z.string().max(60).optional(),
+  ...pageQuery,
+});
 
 export const eventPageSchema = pageOf(eventSchema).meta({ id: 'EventPage' });
 

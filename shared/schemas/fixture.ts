@@ -52,7 +52,10 @@ export const faceSchema = z.strictObject({
 
 /** Shape of the fixture as entered; every change of seat, hold or move needs the version. */
 const fixtureFields = {
-  code: lineSchema(24).regex(/^[A-Za-z0-9][A-Za-z0-9._-]*$/, 'letters, digits, dot, dash or underscore'),
+  code: lineSchema(24).regex(
+    /^[A-Za-z0-9][A-Za-z0-9._-]*$/,
+    'letters, digits, dot, dash or underscore',
+  ),
   name: lineSchema(120),
   line: lineSchema(60),
   status: z.enum(['in use', 'on trial', 'retired']),
@@ -128,7 +131,18 @@ export const fixtureRowSchema = z.object({
   lastTrialAt: instantSchema.nullable(),
 });
 
-export const fixtureSorts = ['code', '-code', 'name', '-name', 'line', '-line', 'verdict', '-verdict', 'trials', '-trials'] as const;
+export const fixtureSorts = [
+  'code',
+  '-code',
+  'name',
+  '-name',
+  'line',
+  '-line',
+  'verdict',
+  '-verdict',
+  'trials',
+  '-trials',
+] as const;
 
 export const fixtureQuerySchema = z.strictObject({
   search: z.string().max(100).optional(),

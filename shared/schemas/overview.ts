@@ -17,7 +17,9 @@ export const overviewRowSchema = z.object({
     .describe('configuration with the lowest working limit, rad/s²'),
   mu50: intervalSchema,
   benchMu: z.number().nullable().describe('mean kinetic coefficient, else static'),
-  margin: z.enum(['breached', 'not shown', 'not checked', 'shown']).describe('worst of the configurations'),
+  margin: z
+    .enum(['breached', 'not shown', 'not checked', 'shown'])
+    .describe('worst of the configurations'),
   partsPerHour: z
     .object({ theory: z.number(), limit: z.number().nullable() })
     .nullable()

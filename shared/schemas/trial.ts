@@ -1,5 +1,13 @@
 import { z } from 'zod';
-import { idSchema, idParamSchema, instantSchema, pageOf, pageQuery, reasonSchema, versionSchema } from './common.ts';
+import {
+  idSchema,
+  idParamSchema,
+  instantSchema,
+  pageOf,
+  pageQuery,
+  reasonSchema,
+  versionSchema,
+} from './common.ts';
 
 export const outcomes = ['held', 'slipped', 'lost'] as const;
 export const judgements = ['peak lag', 'end mark', 'by eye'] as const;
@@ -10,7 +18,10 @@ export const trialSchema = z
     fixtureId: idSchema,
     logId: idSchema,
     version: versionSchema,
-    row: z.number().int().describe('line of the log, the header being line 1 unless lines precede it'),
+    row: z
+      .number()
+      .int()
+      .describe('line of the log, the header being line 1 unless lines precede it'),
     configurationId: idSchema,
     configuration: z.string().describe('label'),
     positionMm: z.number(),
@@ -38,7 +49,18 @@ export const trialPatchSchema = z
   .strictObject({ version: versionSchema, excluded: z.boolean(), reason: reasonSchema })
   .meta({ id: 'TrialPatch' });
 
-export const trialSorts = ['id', '-id', 'acceleration', '-acceleration', 'configuration', '-configuration', 'order', '-order', 'outcome', '-outcome'] as const;
+export const trialSorts = [
+  'id',
+  '-id',
+  'acceleration',
+  '-acceleration',
+  'configuration',
+  '-configuration',
+  'order',
+  '-order',
+  'outcome',
+  '-outcome',
+] as const;
 
 export const trialQuerySchema = z.strictObject({
   configuration: z.string().max(40).optional(),

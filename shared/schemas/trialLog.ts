@@ -48,7 +48,11 @@ export const logMappingInputSchema = z
       .record(z.string().max(60), z.enum(outcomes))
       .optional()
       .describe("the file's own words, lower case, and what they mean"),
-    judgedBy: z.enum(judgements).nullable().optional().describe('for rows without a value of their own'),
+    judgedBy: z
+      .enum(judgements)
+      .nullable()
+      .optional()
+      .describe('for rows without a value of their own'),
     addConfigurations: z
       .boolean()
       .optional()
@@ -109,7 +113,9 @@ export const logAnswerSchema = z
     sample: z.array(z.array(z.string())).describe('first data rows as written'),
     preview: z.array(logPreviewRowSchema).max(2000),
     newConfigurations: z.array(z.object({ label: z.string(), positionMm: z.number() })),
-    changes: z.array(z.string()).describe('sentences: what the stored trials changed; empty in a dry run'),
+    changes: z
+      .array(z.string())
+      .describe('sentences: what the stored trials changed; empty in a dry run'),
   })
   .meta({ id: 'LogAnswer' });
 

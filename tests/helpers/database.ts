@@ -10,6 +10,7 @@ import {
 import { sqlOver } from '../../scripts/lib/mariadb.mjs';
 import { createDataSource } from '../../server/dataSource.ts';
 import type { DatabaseSettings } from '../../server/env.ts';
+import type { TestMariadb } from './databaseSetup.ts';
 
 export type TestDatabase = {
   /** Open, with the application's account. */
@@ -22,8 +23,9 @@ export type TestDatabase = {
 };
 
 /** A fresh database with every migration and grant. */
-export async function createTestDatabase(): Promise<TestDatabase> {
-  const { port, socket, passwords } = inject('mariadb');
+export async function createTestDatabase(
+  { port, socket, passwords }: TestMariadb = inject('mariadb'),
+): Promise<TestDatabase> {
   const database = `t_${randomBytes(6).toString('hex')}`;
   const sql = (text: string) => sqlOver(socket, text);
   sql(accountsSql(database, passwords));

@@ -20,7 +20,7 @@ declare module 'vitest' {
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
   const folder = mkdtempSync(path.join(os.tmpdir(), 'tautline-test-'));
   const { port, socket, stop } = await startMariadb(folder, { durable: false });
-  const { application, migration } = instanceSecrets(folder) as TestMariadb['passwords'];
+  const { application, migration } = instanceSecrets(folder);
   project.provide('mariadb', { port, socket, passwords: { application, migration } });
   return async () => {
     await stop();

@@ -7,7 +7,9 @@ import { createDeps } from '../../server/createDeps.ts';
 import { readEnv } from '../../server/env.ts';
 import type { ApiRoute } from '../../server/http/defineRoute.ts';
 import { createUser } from '../../server/services/createUser.ts';
+import { boundPool } from '../../server/database/boundPool.ts';
 import { createTestDatabase, type TestDatabase } from './database.ts';
+import type { TestMariadb } from './databaseSetup.ts';
 
 export const testPassword = 'nine calm turns of tape';
 
@@ -35,8 +37,11 @@ export type TestServer = {
 };
 
 /** The application over a database of its own. `change` puts other parts in. */
-export async function createTestServer(change: Partial<AppDeps> = {}): Promise<TestServer> {
-  const database = await createTestDatabase();
+export async function createTestServer(
+  change: Partial<AppDeps> = {},
+  mariadb?: TestMariadb,
+): Promise<TestServer> {
+  const database = await createTestDatabase(mariadb);
   const env = readEnv({
     NODE_ENV: 'test',
     TAUTLINE_DB_PORT: String(database.settings.port),
@@ -46,6 +51,7 @@ export async function createTestServer(change: Partial<AppDeps> = {}): Promise<T
     TAUTLINE_BCRYPT_COST: '4',
     TAUTLINE_LOG_LEVEL: 'silent',
   });
+  boundPool(database.dataSource);
   const deps: AppDeps = { ...createDeps(env, database.dataSource), ...change };
   const { express: app, routes } = createApp(deps);
   const known = new Map<string, Promise<unknown>>();

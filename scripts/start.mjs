@@ -10,7 +10,8 @@ import { accountsSql, databaseEnv, grantsSql, migrationEnv } from './lib/account
 import { ensureDebianPackages } from './lib/debianPackages.mjs';
 import { instanceSecrets, startMariadb } from './lib/mariadb.mjs';
 import { ensureBuild, ensureNodeModules } from './lib/prepare.mjs';
-import { run, runChild, SetUpError } from './lib/run.mjs';
+import { forgetServer, noteServer, stopLeftover } from './lib/leftover.mjs';
+import { run, runChild, SetUpError, sleep } from './lib/run.mjs';
 
 process.chdir(path.resolve(import.meta.dirname, '..'));
 
@@ -31,6 +32,7 @@ async function main() {
   ensureNodeModules();
   if (!development) ensureBuild();
 
+  await stopLeftover(dataFolder);
   const mariadb = await startMariadb(dataFolder);
   const stopFirst = { child: null };
   for (const signal of ['SIGINT', 'SIGTERM']) {
@@ -67,9 +69,25 @@ async function serve(mariadb, stopFirst) {
   }
   const { child, ended } = runChild(process.execPath, program('main'), { env });
   stopFirst.child = child;
-  if (!production) printSignIns();
-  else printFirstAdministrator();
-  return ended;
+  noteServer(dataFolder, child.pid);
+  void ready(ended).then((isReady) => {
+    if (isReady) (production ? printFirstAdministrator : printSignIns)();
+  });
+  const code = await ended;
+  forgetServer(dataFolder);
+  return code;
+}
+
+/** Waits for the server to answer; false when it ends first. */
+async function ready(ended) {
+  let over = false;
+  void ended.then(() => (over = true));
+  while (!over) {
+    const answer = await fetch(`http://127.0.0.1:${port}/readyz`).catch(() => null);
+    if (answer?.ok) return !over;
+    await sleep(100);
+  }
+  return false;
 }
 
 function printSignIns() {

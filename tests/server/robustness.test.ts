@@ -171,7 +171,10 @@ describe('the event log', () => {
       rows
         .trim()
         .split('\n')
-        .map((row) => row.split('\t')),
+        .map((row): [string, string] => {
+          const [table = '', rights = ''] = row.split('\t');
+          return [table, rights];
+        }),
     );
     const wanted = Object.fromEntries(
       Object.entries(grants).map(([table, rights]) => [table, rights.toSorted().join(',')]),

@@ -52,7 +52,7 @@ it('shows the manager what needs a decision, and nothing to edit', async () => {
   expect(await page.getByRole('link', { name: 'Edit' }).count()).toBe(0);
   await page.goto(`/fixtures/${id}/trials`);
   await page.getByRole('heading', { name: 'Trials', level: 1 }).waitFor();
-  await page.getByText('70 mm').first().waitFor();
+  await page.getByRole('cell', { name: '70 mm' }).first().waitFor();
   expect(await page.getByRole('button', { name: /Exclude/ }).count()).toBe(0);
   expect(await page.getByRole('link', { name: /Upload/ }).count()).toBe(0);
   await page.context().close();

@@ -66,7 +66,9 @@ export function readEnv(source: Record<string, string | undefined>): Env {
   const sessionSecrets = values.TAUTLINE_SESSION_SECRET.split(',').filter((s) => s !== '');
   for (const secret of sessionSecrets) {
     if (Buffer.byteLength(secret) < 32 || (production && sampleSecret.test(secret))) {
-      throw new Error('TAUTLINE_SESSION_SECRET: each secret must be 32 random bytes or more, not a word or a sample.');
+      throw new Error(
+        'TAUTLINE_SESSION_SECRET: each secret must be 32 random bytes or more, not a word or a sample.',
+      );
     }
   }
   if (sessionSecrets.length === 0) {

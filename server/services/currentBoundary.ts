@@ -1,12 +1,17 @@
 import type { EntityManager } from 'typeorm';
 import { ENGINE } from '../../shared/judge.ts';
-import { analysisOptionsSchema, type Boundary } from '../../shared/schemas/analysis.ts';
+import {
+  analysisOptionsSchema,
+  type AnalysisResult,
+  type Boundary,
+} from '../../shared/schemas/analysis.ts';
 import { verdicts } from '../../shared/schemas/verdict.ts';
 import type { AppDeps } from '../appDeps.ts';
 import { inTransaction } from '../database/inTransaction.ts';
 import { AnalysisRow } from '../entities/AnalysisRow.ts';
 import { BoundaryCacheRow } from '../entities/BoundaryCacheRow.ts';
 import { FixtureRow } from '../entities/FixtureRow.ts';
+import { ProblemError } from '../http/problem.ts';
 import { digestOf } from './digest.ts';
 import { loadFixtureData, type FixtureData } from './fixtureData.ts';
 import { runAnalysis } from './runAnalysis.ts';
@@ -31,7 +36,7 @@ export async function getBoundary(deps: AppDeps, fixtureId: number): Promise<Bou
     digest: cached.digest,
     buildUpRevision: data.buildUp?.revision ?? null,
     result: withNotes(cached.result, theory.notes),
-    reason: prepared.reason,
+    reason: cached.result === null ? cached.sentence : null,
     options: defaultOptions,
     polynomial: theory.polynomial,
     positions: theory.configurations.map(({ label, positionMm, inertia }) => ({
@@ -99,18 +104,35 @@ async function currentCache(
   const cached = await manager.findOneBy(BoundaryCacheRow, { fixtureId });
   if (cached?.dataVersion === dataVersion && cached.engine === ENGINE) return cached;
 
-  const result = prepared.request === null ? null : await runAnalysis(deps, prepared.request);
+  const { result, reason } = await analyseOrSay(deps, prepared);
   const verdict = result?.verdict ?? 'not checked';
   const { friction } = prepared.theory;
   const row: BoundaryCacheRow = {
     ...{ fixtureId, dataVersion, engine: ENGINE, verdict, result },
     digest: inputDigest(prepared, data),
     verdictRank: verdicts.indexOf(verdict),
-    sentence: result?.sentence ?? prepared.reason ?? '',
+    sentence: result?.sentence ?? reason ?? '',
     benchMu: (friction.kinetic ?? friction.static)?.mean ?? null,
   };
   await storeCache(manager, row);
   return row;
+}
+
+/**
+ * One fixture whose stored data the core refuses must not take the lists of all others down: it is
+ * then not checked, and says why.
+ */
+async function analyseOrSay(
+  deps: AppDeps,
+  { request, reason }: PreparedAnalysis,
+): Promise<{ result: AnalysisResult | null; reason: string | null }> {
+  if (request === null) return { result: null, reason };
+  try {
+    return { result: await runAnalysis(deps, request), reason: null };
+  } catch (error) {
+    if (!(error instanceof ProblemError) || error.status !== 422) throw error;
+    return { result: null, reason: `These data cannot be analysed: ${error.message}` };
+  }
 }
 
 /** A slower request must not put an older verdict back: the data version only goes up. */

@@ -31,7 +31,12 @@ export const remarkSchema = z.string().trim().max(5000, 'must be at most 5000 ch
 /** A reason is never empty: an auditor reads it a year later. */
 export const reasonSchema = remarkSchema.min(3, 'give a reason of at least 3 characters');
 
-export const positive = z.number().positive('must be above 0');
+/** Below this nothing is a quantity of a bench, and its squares and quotients leave the doubles. */
+const smallest = 1e-12;
+export const positive = z
+  .number()
+  .positive('must be above 0')
+  .min(smallest, `must be at least ${smallest}`);
 export const nonNegative = z.number().nonnegative('must be 0 or more');
 
 export const pageQuery = {
